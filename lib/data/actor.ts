@@ -1,0 +1,4 @@
+/** Who is asking. */
+export interface Actor {
+  userId: string;
+}
