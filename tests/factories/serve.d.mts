@@ -1,0 +1,1 @@
+export function serve(wantedPort?: number): Promise<{ url: string; stop(): Promise<void> }>;
