@@ -78,4 +78,6 @@ export interface Reason {
   measured?: number;
   limit?: number;
   unit?: "V" | "A" | "s" | "Ohm" | "dBu" | "ratio";
+  /** `unproven`: the missing figure as a path, `input.safeV` or `outputs.0.pulseS`. */
+  figure?: string;
 }
