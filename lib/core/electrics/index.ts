@@ -4,3 +4,4 @@ export { checkConnection } from "./check-connection";
 export { findConnectionIssues, findInputIssues, findOutputIssues, type Issue } from "./find-connection-issues";
 export { dbuOfPeak } from "./judge/judge-audio";
 export { severityOf, worstVerdict } from "./judge/order-verdicts";
+export type * from "./patch-types";
