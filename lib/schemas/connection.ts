@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { findConnectionIssues } from "@/lib/core/electrics/find-connection-issues";
 import { inputSchema, outputSchema } from "./jack";
 
 /** The open connection calculator: one or more outputs joined to one or more inputs by passive leads. */
@@ -13,6 +14,7 @@ export const connectionRequestSchema = z
       if (seen.has(input.id)) ctx.addIssue({ code: "custom", path: ["inputs", index, "id"], message: "This id is used twice." });
       seen.add(input.id);
     });
+    for (const { path, message } of findConnectionIssues(request)) ctx.addIssue({ code: "custom", path, message });
   })
   .meta({ id: "ConnectionRequest" });
 export type ConnectionRequest = z.infer<typeof connectionRequestSchema>;
