@@ -1,4 +1,3 @@
-import "server-only";
 import { hash, verify } from "@node-rs/argon2";
 
 /* argon2id, the library's default; 19 MiB, 2 passes, 1 lane: OWASP Password Storage Cheat Sheet (from memory). */
