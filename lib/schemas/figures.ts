@@ -101,7 +101,23 @@ function sentence(text: string): string {
 
 /** In a form an empty box means "not known"; the API may say null. */
 export function orUnknown<S extends z.ZodType>(schema: S) {
-  return z.preprocess((value) => (value === "" || value === undefined ? null : value), schema.nullable());
+  return z.preprocess((value) => (value === undefined || isBlank(value) ? null : value), schema.nullable());
+}
+
+const isBlank = (value: unknown): boolean => typeof value === "string" && value.trim() === "";
+
+/** A level in dBu: a number, or text such as `+22`, `−10 dBu`. */
+export function level() {
+  const refusal = "Write a level in dBu between −60 and 60, for example 22.";
+  return z
+    .union([z.number(), z.string().max(60)], { error: refusal })
+    .transform((value, ctx): number => {
+      const text = typeof value === "string" ? value.trim().replace("\u2212", "-").replace(/\s*dBu$/i, "") : value;
+      const number = typeof text === "string" && text === "" ? Number.NaN : Number(text);
+      if (Number.isFinite(number) && number >= -60 && number <= 60) return number;
+      ctx.issues.push({ code: "custom", message: refusal, input: value });
+      return z.NEVER;
+    });
 }
 
 /** Limits of which either side may be absent, as for a wanted pulse length. */

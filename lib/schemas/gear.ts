@@ -51,7 +51,7 @@ export const conditionerDetailsSchema = z.strictObject({
 
 export const deskDetailsSchema = z.strictObject({
   kind: z.literal("desk-channel"),
-  channel: z.coerce.number().int().min(1, "Channels count from 1.").max(96),
+  channel: z.coerce.number({ error: "Write the channel's number, for example 3." }).int("A whole number.").min(1, "Channels count from 1.").max(96, "At most 96."),
 });
 
 export const supplyDetailsSchema = z.strictObject({

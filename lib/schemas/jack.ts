@@ -1,6 +1,6 @@
 import { z } from "zod";
 import { SIGNALS } from "@/lib/core/electrics/jacks";
-import { figure, limits, orUnknown, spread } from "./figures";
+import { figure, level, limits, orUnknown, spread } from "./figures";
 import { idSchema, nameSchema } from "./identity";
 
 export const signalSchema = z.enum(SIGNALS as unknown as ["sensor", "trigger", "gate", "envelope", "control", "audio"]);
@@ -104,7 +104,7 @@ export const gearInputSchema = z.strictObject({
       pulseMaxS: orUnknown(figure("s")),
       decayMinS: orUnknown(figure("s")),
       clamp: clampSchema.nullable(),
-      maxDbu: z.preprocess((v) => (v === "" || v === undefined ? null : typeof v === "string" ? Number(v) : v), z.number().min(-60).max(60).nullable()),
+      maxDbu: orUnknown(level()),
       phantom: z.boolean(),
     })
     .superRefine((input, ctx) => {
