@@ -43,6 +43,7 @@ interface FixBase {
 }
 
 export interface DividerFix extends FixBase { kind: "divider"; seriesOhm: number; shuntOhm: number; tol: number }
+export interface DiodeDividerFix extends FixBase { kind: "diode-divider"; dropV: Range; seriesOhm: number; shuntOhm: number; tol: number }
 export interface SeriesResistorFix extends FixBase { kind: "series-resistor"; seriesOhm: number; tol: number; clampA: number }
 export interface SeriesDiodeFix extends FixBase { kind: "series-diode"; dropV: Range; pullDownOhm: number | null }
 export interface LighterLoadFix extends FixBase { kind: "lighter-load"; loadOhm: number | null; dropListeners: string[] }
@@ -50,7 +51,7 @@ export interface PulseWidthFix extends FixBase { kind: "pulse-width"; part: "ohm
 export interface ThroughGearFix extends FixBase { kind: "buffer" | "shaper"; gearId: string; name: string; feedVerdict: Verdict }
 
 /** A way out that has itself been through the check. Parts in SI. */
-export type Fix = DividerFix | SeriesResistorFix | SeriesDiodeFix | LighterLoadFix | PulseWidthFix | ThroughGearFix;
+export type Fix = DividerFix | DiodeDividerFix | SeriesResistorFix | SeriesDiodeFix | LighterLoadFix | PulseWidthFix | ThroughGearFix;
 
 /** The parts that set a pulse's width, which is proportional to ohm × farad. */
 export interface PulseParts { ohm: number; farad: number }
@@ -60,6 +61,8 @@ export interface FreeGear { gearId: string; name: string; input: Input; output: 
 
 /** What fixes may be made from. Absent lists: preferred numbers, E12 first, then E24. */
 export interface FixOptions {
+  /** False: do not look for fixes (the verdicts alone are wanted). */
+  fixes?: boolean;
   /** Resistors in the parts drawer, ohm. */
   drawerOhm?: readonly number[];
   /** Capacitors in the parts drawer, farad. */

@@ -2,6 +2,6 @@ export * from "./jacks";
 export type * from "./connection-types";
 export { checkConnection } from "./check-connection";
 export { findConnectionIssues, findInputIssues, findOutputIssues, type Issue } from "./find-connection-issues";
-export { dbuOfPeak } from "./judge/judge-audio";
+export { dbuOfPeak, peakOfDbu } from "./judge/judge-audio";
 export { severityOf, worstVerdict } from "./judge/order-verdicts";
 export type * from "./patch-types";

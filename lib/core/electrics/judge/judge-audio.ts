@@ -17,6 +17,11 @@ export function dbuOfPeak(peakV: number): number {
   return 20 * Math.log10(peakV / Math.SQRT2 / ZERO_DBU_V);
 }
 
+/** Peak of a sine of a level, V: the inverse of {@link dbuOfPeak}. @param dbu any finite level. */
+export function peakOfDbu(dbu: number): number {
+  return 10 ** (dbu / 20) * ZERO_DBU_V * Math.SQRT2;
+}
+
 /** Level, bridging and phantom power of an audio lead. */
 export function judgeAudio(scene: Scene): Reason[] {
   const audio = scene.driving.filter((i) => scene.outputs[i]?.signal === "audio");

@@ -7,13 +7,16 @@ import type { Scene } from "./scene";
 /** Share of the safe range kept free at either end. */
 const SAFE_SHARE = 0.03;
 
+/** Below this a diode that conducts is rounding, not current. */
+const LEAST_CURRENT_A = 1e-12;
+
 /** `hot`, and the `tight` that belongs to it: can the level, or the current through the clamp, harm the input? */
 export function judgeLimits(scene: Scene): Reason[] {
   return scene.input.clamp ? judgeClamp(scene) : judgeSafeRange(scene);
 }
 
 function judgeClamp({ input, clampA }: Scene): Reason[] {
-  if (!input.clamp || clampA === null || clampA === 0) return [];
+  if (!input.clamp || clampA === null || clampA < LEAST_CURRENT_A) return [];
   const maxA = input.clamp.maxA;
   const numbers = { measured: clampA, limit: maxA, unit: "A" as const };
   return isAbove(clampA, maxA)

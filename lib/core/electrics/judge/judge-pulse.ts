@@ -15,12 +15,11 @@ export function judgePulse(scene: Scene): { reasons: Reason[]; pulseS: Range | n
   let seen: Range | null = null;
   for (const index of scene.driving) {
     reasons.push(...judgeDecay(scene, index));
-    if (limits?.min === undefined && limits?.max === undefined) continue;
     const width = seePulse(scene, index);
     if (!width) continue;
     seen = seen ? { min: Math.min(seen.min, width.min), max: Math.max(seen.max, width.max) } : width;
-    if (limits.min !== undefined) reasons.push(...judgeShortest(nameOutput(scene, index), width.min, limits.min));
-    if (limits.max !== undefined) reasons.push(...judgeLongest(nameOutput(scene, index), width.max, limits.max));
+    if (limits?.min !== undefined) reasons.push(...judgeShortest(nameOutput(scene, index), width.min, limits.min));
+    if (limits?.max !== undefined) reasons.push(...judgeLongest(nameOutput(scene, index), width.max, limits.max));
   }
   return { reasons, pulseS: seen };
 }

@@ -59,9 +59,9 @@ export function clampCurrentAt(node: Node, place: number): number | null {
   const pair = node.clamps.get(place);
   if (!pair || !node.anyState || !node.extremeV) return null;
   const { anyState, extremeV } = node;
-  // A level that stays between the diodes switches neither on.
-  const high = extremeV.max > pair.high.volt.min ? diodeCurrentMost(pair.high, anyState.filter((b) => b !== pair.high)) : 0;
-  const low = extremeV.min < pair.low.volt.max ? diodeCurrentMost(pair.low, anyState.filter((b) => b !== pair.low)) : 0;
+  // A level that stays between the diodes switches neither on; an ideal diode conducts at its very voltage.
+  const high = extremeV.max >= pair.high.volt.min ? diodeCurrentMost(pair.high, anyState.filter((b) => b !== pair.high)) : 0;
+  const low = extremeV.min <= pair.low.volt.max ? diodeCurrentMost(pair.low, anyState.filter((b) => b !== pair.low)) : 0;
   return Math.max(high, low);
 }
 
