@@ -5,3 +5,4 @@ export { findConnectionIssues, findInputIssues, findOutputIssues, type Issue } f
 export { dbuOfPeak, peakOfDbu } from "./judge/judge-audio";
 export { severityOf, worstVerdict } from "./judge/order-verdicts";
 export type * from "./patch-types";
+export { checkPatch, recheckPatch, type CheckPatchOptions } from "./check-patch";

@@ -15,6 +15,8 @@ export interface JackModel {
   role: JackRole;
   output?: Partial<Output>;
   input?: Omit<Input, "id">;
+  /** Input limits that follow the box's supply: the supply's lowest plus `aboveV`, and −`belowV`. Taken beside `safeV`, whichever is nearer. */
+  followsSupply?: { aboveV: number; belowV: number };
 }
 
 /** A pad as a contact: what its resistance does when it is struck. */
@@ -111,9 +113,21 @@ export interface LeadCheck {
   reasons: Reason[];
   fixes: Fix[];
   fixNote?: string;
+  /** Said beside the verdict, and no part of it. */
+  cautions: Caution[];
   /** Assumed figures this verdict leans on, as `<gearId>:<path>`. */
   assumed: string[];
+  /** Every lead this verdict depends on, itself included, sorted: those of its node, and those that feed the boxes driving it. */
+  relatedLeadIds: string[];
   nextMeasurement?: Measurement;
+}
+
+/** `unpowered`: what flows into the rail of a box that is switched off. */
+export interface Caution {
+  kind: "unpowered";
+  text: string;
+  measured: number;
+  unit: "A";
 }
 
 /** The chain from one pad (or the first output) to what is heard. */
@@ -134,6 +148,8 @@ export interface PatchCheck {
   /** Worst verdict of all leads; `good` where there are none. */
   worst: Verdict;
   counts: Record<Verdict, number>;
+  /** Boxes that fixes could lead through when this was checked. */
+  freeGearIds: string[];
   /** The one figure that would settle most leads. */
   nextMeasurement?: Measurement;
 }
