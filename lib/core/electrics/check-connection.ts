@@ -2,8 +2,8 @@ import { checkBare } from "./check-bare";
 import type { Connection, ConnectionCheck, FixOptions } from "./connection-types";
 import { suggestFixes } from "./fixes/suggest-fixes";
 
-/** Fixes are looked for at so many inputs of one node; the rest can be asked about alone. */
-const MOST_FIXED = 8;
+/** Fixes are looked for where so many inputs share a node at most; beyond that each can be asked about alone. */
+const MOST_JOINED = 16;
 
 /**
  * Says of outputs joined to inputs — a lead, or a passive mult — whether each input is safe and will fire,
@@ -25,10 +25,9 @@ const MOST_FIXED = 8;
 export function checkConnection(connection: Connection, options: FixOptions = {}): ConnectionCheck {
   const check = checkBare(connection);
   if (options.fixes === false) return check;
-  let looked = 0;
   const listeners = check.listeners.map((listener, place) => {
     if (listener.verdict === "good" || listener.verdict === "tight" || listener.verdict === "unproven") return listener;
-    if (looked++ < MOST_FIXED) return { ...listener, ...suggestFixes(connection, place, listener, options) };
+    if (connection.inputs.length <= MOST_JOINED) return { ...listener, ...suggestFixes(connection, place, listener, options) };
     return listener.verdict === "hot" ? { ...listener, fixNote: "Many inputs hang here: check this one alone to see its fix." } : listener;
   });
   return { ...check, listeners };

@@ -2,6 +2,7 @@ import { toRange, type Range, type Spread } from "./spread";
 import { PREFIX_EXPONENT, UNITS, type Prefix, type Unit } from "./units";
 
 const MINUS = "\u2212";
+const SCALE: Record<Prefix, number> = { p: 1e-12, n: 1e-9, u: 1e-6, m: 1e-3, "": 1, k: 1e3, M: 1e6, G: 1e9 };
 
 /**
  * A value with its unit and at most 3 significant figures, for people: `4.7 kΩ`, `0.6 V`, `2.62 ms`, `−0.5 V`.
@@ -60,15 +61,14 @@ function prefixFor(value: number, unit: Unit): Prefix {
   if (size === 0) return "";
   let best: Prefix = prefixes[0] ?? "";
   for (const prefix of prefixes) {
-    // Judged after rounding to 3 figures, so that 999.6 Ω prints as 1 kΩ.
-    const mantissa = Number((size / 10 ** PREFIX_EXPONENT[prefix]).toPrecision(3));
-    if (mantissa >= leastMantissa) best = prefix;
+    // 0.9995 rounds to 1.00 in three figures: 999.6 Ω prints as 1 kΩ.
+    if (size / SCALE[prefix] >= 0.9995 * leastMantissa) best = prefix;
   }
   return best;
 }
 
 function significant(value: number, prefix: Prefix): string {
-  const mantissa = Number((value / 10 ** PREFIX_EXPONENT[prefix]).toPrecision(3));
+  const mantissa = Number((value / SCALE[prefix]).toPrecision(3));
   const text = Math.abs(mantissa) >= 1e6 || (mantissa !== 0 && Math.abs(mantissa) < 1e-4) ? mantissa.toExponential() : String(mantissa);
   return text.replace("-", MINUS);
 }

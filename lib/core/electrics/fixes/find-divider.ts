@@ -7,8 +7,8 @@ import { around, closerResistorLists, RESISTOR_TOL } from "./part-lists";
 import { isFit, tryInLead } from "./try-lead";
 
 /** Divider resistors to the listener's side: low enough for its load, high enough for most outputs. */
-const LEAST_SHUNT_OHM = 470;
-const MOST_SHUNT_OHM = 330e3;
+const LEAST_SHUNT_OHM = 1e3;
+const MOST_SHUNT_OHM = 220e3;
 
 interface Candidate {
   seriesOhm: number;

@@ -3,6 +3,7 @@ import type { Connection } from "../connection-types";
 import type { Output } from "../jacks";
 import { clampBranches, loadBranch, outputBranch, type Branch, type DriveState } from "./branch";
 import { diodeCurrentMost, sourceCurrentRange } from "./branch-currents";
+import { keepFinite } from "./keep-finite";
 import { nodeRange, type Floating } from "./solve-node";
 
 /** Everything that hangs on one node, and what follows from it for all listeners alike. */
@@ -22,7 +23,8 @@ export interface Node {
   anyState: Branch[] | null;
 }
 
-export function buildNode({ outputs, inputs }: Connection): Node {
+export function buildNode(connection: Connection): Node {
+  const { outputs, inputs } = keepFinite(connection);
   const driving = outputs.flatMap((output, i) => (output.signal === "sensor" ? [] : [i]));
   const drivers = driving.map((i) => outputs[i] as Partial<Output>);
   const floating: Floating = drivers.length === 0 ? "zero" : drivers[0]?.polarity === "falling" ? "high" : "low";

@@ -14,9 +14,6 @@ export interface Piece {
 /** Which end is taken where the node floats between diodes that all block. */
 export type Floating = "low" | "high" | "zero";
 
-/** A lead's own resistance: taken where two ideal sources fight, so that the answer stays finite. */
-const LEAD_OHM = 1e-3;
-
 /** The branch as it feeds most current into the node, whatever the node's level. */
 export function feedMost({ volt, ohm, flow }: Branch): Piece {
   return {
@@ -60,44 +57,28 @@ export function currentInto(pieces: readonly Piece[], volt: number): number {
  * Source: J. Millman, “A Useful Network Theorem”, Proc. IRE 28 (1940), from memory; Kirchhoff's current law.
  */
 export function nodeRange(branches: readonly Branch[], floating: Floating): Range {
-  return {
-    min: solvePieces(branches.map(feedLeast), floating),
-    max: solvePieces(branches.map(feedMost), floating),
-  };
+  const least = solvePieces(branches.map(feedLeast), floating);
+  const most = solvePieces(branches.map(feedMost), floating);
+  // Without any spread the two differ by rounding at most, and may come out crossed.
+  return { min: Math.min(least, most), max: Math.max(least, most) };
 }
 
-/** The level at which settled branches feed as much as they drain. An isolated node rests at 0 V. */
+/** The level at which settled branches feed as much as they drain. An isolated node rests at 0 V. Ideal branches must not fight (see `keepFinite`). */
 export function solvePieces(pieces: readonly Piece[], floating: Floating): number {
   if (pieces.length === 0) return 0;
-  const settled = fights(pieces) ? pieces.map(withLeadOhm) : pieces;
-  const levels = settled.map((p) => p.volt).sort((a, b) => a - b);
+  const levels = pieces.map((p) => p.volt).sort((a, b) => a - b);
   // First level whose right-hand current is not positive: the lowest root lies at it or just below it.
   let low = 0;
   let high = levels.length;
   while (low < high) {
     const middle = (low + high) >> 1;
-    if (sideCurrent(settled, levels[middle] as number, "right") > 0) low = middle + 1;
+    if (sideCurrent(pieces, levels[middle] as number, "right") > 0) low = middle + 1;
     else high = middle;
   }
-  if (low === levels.length) return millman(settled, levels[low - 1] as number, Infinity);
+  if (low === levels.length) return millman(pieces, levels[low - 1] as number, Infinity);
   const level = levels[low] as number;
-  if (sideCurrent(settled, level, "left") < 0) return millman(settled, low === 0 ? -Infinity : (levels[low - 1] as number), level);
-  return settleFloating(settled, levels, low, floating);
-}
-
-/** True where one ideal branch holds the node up and another holds it down. */
-function fights(pieces: readonly Piece[]): boolean {
-  let floor = -Infinity;
-  let ceiling = Infinity;
-  for (const piece of pieces) {
-    if (piece.below === Infinity) floor = Math.max(floor, piece.volt);
-    if (piece.above === Infinity) ceiling = Math.min(ceiling, piece.volt);
-  }
-  return floor > ceiling;
-}
-
-export function withLeadOhm(piece: Piece): Piece {
-  return { volt: piece.volt, below: Math.min(piece.below, 1 / LEAD_OHM), above: Math.min(piece.above, 1 / LEAD_OHM) };
+  if (sideCurrent(pieces, level, "left") < 0) return millman(pieces, low === 0 ? -Infinity : (levels[low - 1] as number), level);
+  return settleFloating(pieces, levels, low, floating);
 }
 
 /** Current into the node just beside a branch's own voltage, where an ideal one jumps. */

@@ -6,7 +6,7 @@ import type { LeadCheck } from "../patch-types";
 import { cautionUnpowered } from "./caution-unpowered";
 import { findAssumed } from "./find-assumed";
 import { findCircuitPulse } from "./find-circuit-pulse";
-import type { Lead, PatchIndex, PatchNode, PlacedJack } from "./index-patch";
+import type { Lead, PatchNode, PlacedJack } from "./index-patch";
 import type { NodeContext } from "./node-context";
 import { relatedLeads } from "./related-leads";
 import { resolveInput, resolveOutput, type ResolvedOutput } from "./resolve-jacks";
