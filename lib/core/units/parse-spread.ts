@@ -3,7 +3,8 @@ import type { Spread } from "./spread";
 import { PREFIX_EXPONENT, type Unit } from "./units";
 
 const TOLERANCE = /^(.*?)\s*(?:±|\+\s*\/\s*-|\+-)\s*(.+)$/;
-const PERCENT = /^(\d+\.?\d*|\.\d+)\s*%$/;
+const PERCENT = /^((?:\d+\.?\d*|\.\d+)(?:e[+-]?\d{1,3})?)\s*%$/i;
+const LONGEST_TEXT = 160;
 const RANGE_WORD = /^(.*?[^.])\s*(?:\.{2,3}|…|–|—|~|\bto\b)\s*(.+)$/i;
 
 /**
@@ -14,6 +15,7 @@ const RANGE_WORD = /^(.*?[^.])\s*(?:\.{2,3}|…|–|—|~|\bto\b)\s*(.+)$/i;
  */
 export function parseSpread(text: string, unit: Unit): Parsed<Spread> {
   const plain = normaliseText(text);
+  if (plain.length > LONGEST_TEXT) return { ok: false, message: "That is too long to be a value." };
   const toleranced = TOLERANCE.exec(plain);
   if (toleranced) return readToleranced(toleranced[1] ?? "", toleranced[2] ?? "", unit);
   const worded = RANGE_WORD.exec(plain);
