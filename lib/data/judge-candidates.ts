@@ -1,7 +1,9 @@
 import type { Gear } from "@/lib/schemas/gear";
 import type { Patch } from "@/lib/schemas/patch";
+import { checkPatch, recheckPatch } from "@/lib/core/electrics";
 import type { Candidate } from "./check-draft";
-import { checkGearPatch } from "./check-gear-patch";
+import { CHECK_OPTIONS } from "./check-gear-patch";
+import { toRigModel } from "./to-rig-model";
 
 const DRAFT_LEAD = "draft-lead";
 
@@ -13,13 +15,16 @@ export function judgeCandidates(gear: readonly Gear[], patch: Patch, from: strin
   const startsAtOutput = start.jack.direction === "output";
   const joined = new Set(patch.leads.map((lead) => `${lead.outputId}>${lead.inputId}`));
   const numbers = new Set(patch.leads.map((lead) => lead.number));
+  const rig = toRigModel(gear);
+  const options = { ...CHECK_OPTIONS, fixes: false as const };
+  const before = checkPatch(rig, patch, options);
   let number = 1;
   while (numbers.has(number)) number += 1;
   return jacks.flatMap(({ jack, gearId }) => {
     const [outputId, inputId] = startsAtOutput ? [from, jack.id] : [jack.id, from];
     if (jack.direction === start.jack.direction || gearId === start.gearId || joined.has(`${outputId}>${inputId}`)) return [];
     const lead = { id: DRAFT_LEAD, number, colour: "black" as const, outputId, inputId };
-    const outcome = checkGearPatch(gear, { ...patch, leads: [...patch.leads, lead] }).leads[DRAFT_LEAD];
+    const outcome = recheckPatch(before, rig, { ...patch, leads: [...patch.leads, lead] }, [], options).leads[DRAFT_LEAD];
     return outcome ? [{ jackId: jack.id, verdict: outcome.verdict, text: outcome.reasons[0]?.text ?? "" }] : [];
   });
 }
