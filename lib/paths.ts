@@ -14,8 +14,11 @@ export const paths = {
   rigs: () => "/rigs",
   rig: rigPath,
   gearList: (rigId: string) => `${rigPath(rigId)}/gear`,
-  newGear: (rigId: string, kind?: string) => `${rigPath(rigId)}/gear/new${kind ? `?kind=${enc(kind)}` : ""}`,
+  newGear: (rigId: string, kind?: string, variant?: string) =>
+    `${rigPath(rigId)}/gear/new${kind ? `?kind=${enc(kind)}${variant ? `&variant=${enc(variant)}` : ""}` : ""}`,
   gear: (rigId: string, gearId: string) => `${rigPath(rigId)}/gear/${enc(gearId)}`,
+  editGear: (rigId: string, gearId: string) => `${rigPath(rigId)}/gear/${enc(gearId)}?edit=1`,
+  savedGear: (rigId: string, gearId: string, revision: number) => `${rigPath(rigId)}/gear/${enc(gearId)}?saved=${revision}`,
   songs: (rigId: string) => `${rigPath(rigId)}/songs`,
   board: (rigId: string, songId: string) => `${rigPath(rigId)}/songs/${enc(songId)}`,
   sheet: (rigId: string, songId: string) => `${rigPath(rigId)}/songs/${enc(songId)}/sheet`,

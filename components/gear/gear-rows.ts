@@ -33,8 +33,8 @@ export function readGearQuery(params: Pick<URLSearchParams, "get">): GearQuery {
     descending: params.get("dir") === "down",
     kind: GEAR_KINDS.find((known) => known === kind) ?? null,
     text: (params.get("q") ?? "").slice(0, 80),
-    assumedOnly: params.get("assumed") === "1",
-    retired: params.get("retired") === "1",
+    assumedOnly: params.get("assumed") === "yes",
+    retired: params.get("retired") === "yes",
   };
 }
 
@@ -43,8 +43,8 @@ export function writeGearQuery(query: GearQuery): string {
   const params = new URLSearchParams();
   if (query.text) params.set("q", query.text);
   if (query.kind) params.set("kind", query.kind);
-  if (query.assumedOnly) params.set("assumed", "1");
-  if (query.retired) params.set("retired", "1");
+  if (query.assumedOnly) params.set("assumed", "yes");
+  if (query.retired) params.set("retired", "yes");
   if (query.sort) params.set("sort", query.sort);
   if (query.sort && query.descending) params.set("dir", "down");
   return params.toString();

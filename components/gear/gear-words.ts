@@ -45,3 +45,5 @@ export const ROLE_WORD: Record<JackRole, string> = {
   "envelope-out": "The circuit's envelope",
   through: "Passed through",
 };
+
+export const COLUMN_WORD = { name: "Name", kind: "Kind", figures: "Figures", assumed: "Assumed", supply: "Runs on", state: "State" } as const;

@@ -1,7 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { arrangeGearRows, buildGearRows, readGearQuery, writeGearQuery, type GearQuery } from "@/components/gear/gear-rows";
 import { summariseGear } from "@/components/gear/summarise-gear";
-import { startingGear } from "@/lib/core/electrics/starting-figures";
+import { startForRig } from "@/components/gear/start-for-rig";
+import { startingGear, startingVariants } from "@/lib/core/electrics/starting-figures";
 import { gearInputSchema, type Gear, type GearKind } from "@/lib/schemas/gear";
 
 let n = 0;
@@ -61,5 +62,25 @@ describe("the one-line summary", () => {
     expect(summariseGear(make("supply", "split-12v"))).toBe("12 V ±5 % and −12 V");
     expect(summariseGear(make("desk-channel", "mic"))).toBe("channel 1, audio in up to 0 dBu phantom on");
     expect(summariseGear(make("voice", "trigger"))).toBe("trigger/gate in fires at 1–2 V → audio out 5 V");
+  });
+});
+
+describe("starting figures fitted to a rig", () => {
+  const rig = [battery, make("supply", "split-12v", { id: "split", retired: true }), make("supply", "split-12v", { id: "split2" }), make("desk-channel", "line"), make("desk-channel", "line", { retired: true })];
+  const startOf = (kind: GearKind, variant: string) => {
+    const found = startingVariants(kind).find((known) => known.variant === variant);
+    if (!found) throw new Error("no such variant");
+    return startForRig(found, rig, makeId);
+  };
+
+  it("runs on a supply of the rig that suits it, never on a retired one", () => {
+    expect(startOf("conditioner", "single-9v").supplyId).toBe("battery");
+    expect(startOf("voice", "trigger").supplyId).toBe("split2");
+    expect(startOf("voice", "logic-5v").supplyId).toBeNull();
+    expect(startOf("pad", "foam").supplyId).toBeNull();
+  });
+
+  it("takes the next free channel of the desk", () => {
+    expect(startOf("desk-channel", "line").details).toMatchObject({ channel: 2 });
   });
 });

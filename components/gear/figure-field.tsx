@@ -1,0 +1,70 @@
+"use client";
+
+import clsx from "clsx";
+import { useController, useFormContext, useWatch, type FieldPath } from "react-hook-form";
+import { TextInput } from "@/components/ui/inputs";
+import { assumedPath } from "./assumed-paths";
+import { FieldShell } from "./field-shell";
+import { figureInfo } from "./figure-catalogue";
+import { readBack } from "./figure-text";
+import type { GearFormValues } from "./form-values";
+import { fieldId } from "./list-faults";
+
+const UNIT_SIGN = { V: "V", Ohm: "Ω", F: "F", s: "s", A: "A", dBu: "dBu" } as const;
+
+/** One electrical figure: what was typed, what it is taken for, whether it is assumed, and how to measure it. */
+export function FigureField({ path }: { path: string }) {
+  const info = figureInfo(path);
+  if (!info) throw new RangeError(`not a figure: ${path}`);
+  const { control, getValues, setValue } = useFormContext<GearFormValues>();
+  const { field, fieldState } = useController({ control, name: path as FieldPath<GearFormValues> });
+  const assumed = useWatch({ control, name: "assumed" });
+  const key = assumedPath(path, getValues("jacks"));
+  const isAssumed = assumed.includes(key);
+  const text = typeof field.value === "string" ? field.value : "";
+  const error = fieldState.error?.message;
+  const id = fieldId(path);
+  const markAssumed = (on: boolean) =>
+    setValue("assumed", on ? [...assumed, key] : assumed.filter((known) => known !== key), { shouldDirty: true });
+
+  return (
+    <FieldShell
+      id={id}
+      label={info.label}
+      unit={UNIT_SIGN[info.unit]}
+      error={error}
+      help={info.help}
+      readBack={readBack(text, info)}
+      mark={text.trim() === "" ? null : { on: isAssumed, set: markAssumed }}
+    >
+      <TextInput
+        id={id}
+        ref={field.ref}
+        name={field.name}
+        value={text}
+        autoComplete="off"
+        autoCapitalize="off"
+        spellCheck={false}
+        maxLength={60}
+        placeholder={info.optional ? "not known" : undefined}
+        className={clsx("font-mono tabular-nums", isAssumed && text.trim() !== "" && "border-dotted")}
+        aria-invalid={error ? true : undefined}
+        aria-describedby={[`${id}-back`, error ? `${id}-error` : "", `${id}-help`].filter(Boolean).join(" ")}
+        onBlur={field.onBlur}
+        onChange={(event) => {
+          field.onChange(event.target.value);
+          if (isAssumed) markAssumed(false);
+        }}
+      />
+    </FieldShell>
+  );
+}
+
+/** Several figures side by side, as many as fit. */
+export function FigureGrid({ paths }: { paths: readonly string[] }) {
+  return (
+    <div className="grid grid-cols-1 gap-x-6 gap-y-4 sm:grid-cols-2 lg:grid-cols-3">
+      {paths.map((path) => <FigureField key={path} path={path} />)}
+    </div>
+  );
+}

@@ -1,0 +1,118 @@
+"use client";
+
+import { useRouter } from "next/navigation";
+import { useEffect, useRef } from "react";
+import { FormProvider } from "react-hook-form";
+import { paths } from "@/lib/paths";
+import type { Gear, GearInput } from "@/lib/schemas/gear";
+import { ConditionerPreview } from "./conditioner-preview";
+import { ConflictPanel } from "./conflict-panel";
+import { DetailsFields } from "./details-fields";
+import { DraftOffer } from "./draft-offer";
+import { draftKey } from "./draft-store";
+import { FaultSummary } from "./fault-summary";
+import { focusFirstFault } from "./focus-fault";
+import { FormSection } from "./form-section";
+import { KIND_HINT, KIND_WORD } from "./gear-words";
+import { JacksSection } from "./jacks-section";
+import { KnobsSection } from "./knobs-section";
+import { LeaveDialog } from "./leave-dialog";
+import { SelectField, TextField } from "./plain-fields";
+import { SaveBar } from "./save-bar";
+import { useGearDraft } from "./use-gear-draft";
+import { useGearForm } from "./use-gear-form";
+import { useLeaveWarning } from "./use-leave-warning";
+
+export interface SupplyChoice {
+  id: string;
+  name: string;
+}
+
+interface GearFormProps {
+  rigId: string;
+  /** Null: a new piece of gear. */
+  gear: Gear | null;
+  /** What the form begins with. */
+  start: GearInput;
+  /** Names this form among the drafts kept on the device. */
+  draftId: string;
+  supplies: SupplyChoice[];
+  /** Pads of the rig, to try a conditioner with. */
+  pads: Gear[];
+}
+
+/** Creates or edits one piece of gear. */
+export function GearForm({ rigId, gear, start, draftId, supplies, pads }: GearFormProps) {
+  const router = useRouter();
+  const element = useRef<HTMLFormElement>(null);
+  const key = draftKey(rigId, draftId);
+  const done = useRef<(saved: Gear) => void>(() => undefined);
+  const state = useGearForm(rigId, gear, start, (saved) => done.current(saved));
+  const { form, baseRevision, faultyTries } = state;
+  const { isDirty } = form.formState;
+  const { forget } = useGearDraft(form, key, baseRevision, isDirty);
+  const { leavingTo, stay } = useLeaveWarning(isDirty);
+  const kind = start.details.kind;
+  const backTo = gear ? paths.gear(rigId, gear.id) : paths.gearList(rigId);
+
+  useEffect(() => {
+    done.current = (saved) => {
+      forget();
+      form.reset(form.getValues());
+      router.push(paths.savedGear(rigId, saved.id, saved.revision));
+      router.refresh();
+    };
+  });
+
+  useEffect(() => {
+    if (faultyTries > 0) focusFirstFault(element.current);
+  }, [faultyTries]);
+
+  const supplyName = (id: string | null) => supplies.find((supply) => supply.id === id)?.name ?? "none";
+  const supplyOptions = Object.fromEntries([["", "None, or not recorded"], ...supplies.map(({ id, name }) => [id, name])]);
+
+  return (
+    <FormProvider {...form}>
+      <form
+        ref={element}
+        noValidate
+        className="flex flex-col gap-8"
+        aria-label={gear ? `Edit ${gear.name}` : `New ${KIND_WORD[kind].toLowerCase()}`}
+        onSubmit={(event) => {
+          event.preventDefault();
+          void state.submit();
+        }}
+      >
+        <DraftOffer draftKey={key} revision={gear?.revision ?? 0} onRestore={(draft) => state.restore(draft.values, draft.baseRevision)} />
+        <FaultSummary tries={faultyTries} refusal={state.refusal} />
+        {state.conflict ? (
+          <ConflictPanel
+            mine={state.conflict.mine}
+            stored={state.conflict.stored}
+            supplyName={supplyName}
+            busy={state.busy}
+            onKeepMine={() => void state.submit(state.conflict?.stored.revision)}
+            onTakeStored={state.takeStored}
+          />
+        ) : null}
+        <FormSection title={KIND_WORD[kind]} intro={KIND_HINT[kind]}>
+          <TextField path="name" label="Name, as it stands on its tape" />
+          {kind === "supply" ? null : <SelectField path="supplyId" label="Runs on" options={supplyOptions} />}
+          <DetailsFields />
+          {kind === "conditioner" ? <ConditionerPreview pads={pads} /> : null}
+        </FormSection>
+        {kind === "supply" ? null : <JacksSection kind={kind} />}
+        {kind === "supply" || kind === "pad" ? null : <KnobsSection turnsMatter={kind === "conditioner"} />}
+        <FormSection title="Notes">
+          <TextField path="notes" label="Anything worth remembering" lines={4} />
+        </FormSection>
+        <SaveBar busy={state.busy} dirty={isDirty} isNew={gear === null} backTo={backTo} putAside={state.putAside !== null} onBringBack={state.bringBack} />
+      </form>
+      <LeaveDialog
+        to={leavingTo}
+        onStay={stay}
+        onLeave={(href) => router.push(href)}
+      />
+    </FormProvider>
+  );
+}
