@@ -27,6 +27,9 @@ interface Candidate {
  * Source: loaded divider, *Lessons in Electric Circuits* vol. I ch. 6.
  */
 export function findDivider(connection: Connection, place: number, extreme: Range, options: FixOptions, dropV?: Range): DividerFix | DiodeDividerFix | null {
+  const input = connection.inputs[place];
+  const driver = connection.outputs.find((output) => output.signal !== "sensor");
+  if (!input || driver?.activeV === undefined || isTooWide(input, toRange(driver.activeV))) return null;
   let best: Candidate | null = null;
   for (const { list, tol } of closerResistorLists(options)) {
     for (const candidate of candidatesFrom(list, connection, place, extreme, tol, dropV)) {
@@ -62,15 +65,27 @@ function* candidatesFrom(list: readonly number[], connection: Connection, place:
 
 /** The share of the output's level to let through: midway between what fires and what is safe; null where they do not meet. */
 export function wantedShare(input: Input, extreme: Range): number | null {
-  const ceiling = Math.min(
-    input.safeV ? toRange(input.safeV).max : input.clamp ? toRange(input.clamp.highV).min : Infinity,
-    input.maxDbu === undefined ? Infinity : peakOfDbu(input.maxDbu),
-  );
+  const ceiling = ceilingOf(input);
   if (ceiling === Infinity || ceiling <= 0 || extreme.max <= 0) return null;
   const most = Math.min(1, ceiling / extreme.max);
   const on = input.onV === undefined || input.polarity === "falling" ? 0 : toRange(input.onV).max;
   const least = on > 0 ? on / extreme.max : 0.8 * most;
   return least >= most ? most : (most + least) / 2;
+}
+
+function ceilingOf(input: Input): number {
+  return Math.min(
+    input.safeV ? toRange(input.safeV).max : input.clamp ? toRange(input.clamp.highV).min : Infinity,
+    input.maxDbu === undefined ? Infinity : peakOfDbu(input.maxDbu),
+  );
+}
+
+/** A divider takes the same share of the output's own highest and lowest level: where these lie further apart than limit and threshold, none fits. */
+function isTooWide(input: Input, activeV: Range): boolean {
+  if (input.onV === undefined || input.polarity === "falling" || activeV.min <= 0) return false;
+  const bias = toRange(input.biasV ?? 0);
+  if (bias.min !== 0 || bias.max !== 0 || input.clamp) return false;
+  return activeV.max * toRange(input.onV).max > ceilingOf(input) * activeV.min;
 }
 
 function leastMargin(input: Input, check: { highV: Range; lowV: Range }): number {
