@@ -5,7 +5,7 @@ import { conditionerAsker } from "./patch/ask-conditioner";
 import { checkNode } from "./patch/check-node";
 import { nextOfLead, nextOfPatch } from "./patch/choose-measurement";
 import { indexPatch, type Lead, type PatchIndex, type PatchNode } from "./patch/index-patch";
-import { listFreeGear } from "./patch/list-free-gear";
+import { freeGearIds, listFreeGear } from "./patch/list-free-gear";
 import type { NodeContext } from "./patch/node-context";
 import { relatedLeads } from "./patch/related-leads";
 import { traceRuns } from "./patch/trace-runs";
@@ -45,15 +45,14 @@ export function checkPatch(rig: RigModel, patch: PatchModel, options: CheckPatch
 export function recheckPatch(previous: PatchCheck, rig: RigModel, patch: PatchModel, changedIds: Iterable<string>, options: CheckPatchOptions = {}): PatchCheck {
   const index = indexPatch(rig, patch);
   const changed = new Set(changedIds);
-  const free = listFreeGear(index).map((gear) => gear.gearId);
+  const free = freeGearIds(index);
   const sameFree = free.join() === previous.freeGearIds.join() && !free.some((id) => changed.has(id));
   return assemble(index, options, (node) => keep(previous, index, node, changed, sameFree));
 }
 
 function assemble(index: PatchIndex, options: CheckPatchOptions, kept: (node: PatchNode) => LeadCheck[] | null): PatchCheck {
   const { simulate, ...rest } = options;
-  const freeGear = listFreeGear(index);
-  const fixOptions = { freeGear, ...rest };
+  const fixOptions = { freeGear: listFreeGear(index), ...rest };
   const context: NodeContext = { index, ask: conditionerAsker(index, simulate), simulate, fixOptions };
   const checked = [
     ...index.nodes.flatMap((node) => kept(node) ?? checkNode(context, node).map((lead) => withNext(index, lead))),
@@ -71,7 +70,7 @@ function assemble(index: PatchIndex, options: CheckPatchOptions, kept: (node: Pa
     runs: traceRuns(index, leads),
     worst: worstVerdict(list.map((lead) => lead.verdict)),
     counts: Object.fromEntries(VERDICTS.map((verdict) => [verdict, list.filter((lead) => lead.verdict === verdict).length])) as Record<Verdict, number>,
-    freeGearIds: freeGear.map((gear) => gear.gearId),
+    freeGearIds: freeGearIds(index),
     ...(next ? { nextMeasurement: next } : {}),
   };
 }

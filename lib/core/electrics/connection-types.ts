@@ -48,7 +48,7 @@ export interface SeriesResistorFix extends FixBase { kind: "series-resistor"; se
 export interface SeriesDiodeFix extends FixBase { kind: "series-diode"; dropV: Range; pullDownOhm: number | null }
 export interface LighterLoadFix extends FixBase { kind: "lighter-load"; loadOhm: number | null; dropListeners: string[] }
 export interface PulseWidthFix extends FixBase { kind: "pulse-width"; part: "ohm" | "farad"; value: number; tol: number; pulseS: Range }
-export interface ThroughGearFix extends FixBase { kind: "buffer" | "shaper"; gearId: string; name: string; feedVerdict: Verdict }
+export interface ThroughGearFix extends FixBase { kind: "buffer" | "shaper" | "conditioner"; gearId: string; name: string; feedVerdict: Verdict }
 
 /** A way out that has itself been through the check. Parts in SI. */
 export type Fix = DividerFix | DiodeDividerFix | SeriesResistorFix | SeriesDiodeFix | LighterLoadFix | PulseWidthFix | ThroughGearFix;

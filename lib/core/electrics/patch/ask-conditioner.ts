@@ -55,7 +55,7 @@ function nodesAt(index: PatchIndex, gear: GearModel, wanted: (placed: PlacedJack
 }
 
 /** The knob that turns the threshold; midway where the song says nothing. */
-function turnOf(index: PatchIndex, gear: GearModel): number {
+export function turnOf(index: PatchIndex, gear: GearModel): number {
   const knob = gear.knobs?.find((k) => k.turns === "threshold");
   const set = index.patch.knobs.find((k) => k.gearId === gear.id && k.knobId === knob?.id);
   return set?.position ?? 0.5;

@@ -6,6 +6,7 @@ import type { LeadCheck } from "../patch-types";
 import { cautionUnpowered } from "./caution-unpowered";
 import { findAssumed } from "./find-assumed";
 import { findCircuitPulse } from "./find-circuit-pulse";
+import { findFreeConditioner } from "./find-free-conditioner";
 import type { Lead, PatchNode, PlacedJack } from "./index-patch";
 import type { NodeContext } from "./node-context";
 import { relatedLeads } from "./related-leads";
@@ -45,7 +46,7 @@ function checkElectric(context: NodeContext, node: PatchNode): Map<string, (lead
   return new Map(check.listeners.map((listener, place) => {
     const { gear } = node.inputs[place] as PlacedJack;
     const reasons = explainBlanks(node, resolved, listener.reasons);
-    const fixes = [...listener.fixes, ...findCircuitPulse(context, node, connection, place, listener)];
+    const fixes = [...listener.fixes, ...findCircuitPulse(context, node, connection, place, listener), ...findFreeConditioner(context, node, connection, place, listener)];
     const cautions = cautionUnpowered(connection, place, gear);
     return [listener.id, (leadId: string): Bare => ({ ...present(listener), leadId, reasons, fixes, cautions, currentA: check.source.currentA })];
   }));

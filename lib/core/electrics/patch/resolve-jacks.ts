@@ -1,5 +1,6 @@
 import { toRange, type Range } from "@/lib/core/units/spread";
 import { SIGNALS, type Input, type Output } from "../jacks";
+import type { ConditionerOutcome, JackModel } from "../patch-types";
 import type { ConditionerAnswer, NoAnswer } from "./ask-conditioner";
 import type { PlacedJack } from "./index-patch";
 
@@ -15,11 +16,23 @@ export function resolveOutput({ jack, gear }: PlacedJack, ask: (gear: PlacedJack
   const computed = jack.role === "trigger-out" || jack.role === "envelope-out";
   if (!computed || !gear.circuit) return { figures: stated };
   const answer = ask(gear);
-  const kept = pick(stated, ["signal", "polarity", "or"]);
-  const signal = jack.role === "envelope-out" ? "envelope" : "trigger";
-  if ("missing" in answer) return { figures: { signal, ...kept }, missing: answer.missing };
-  const found = jack.role === "envelope-out" ? answer.outcome.envelope : answer.outcome.trigger;
-  return { figures: { signal, ...withoutBlanks(stated), ...withoutBlanks(found ?? {}), ...kept } };
+  if (!("missing" in answer)) return { figures: conditionerOutput(jack, answer.outcome) ?? stated };
+  return { figures: { ...signalOf(jack), ...pick(stated, KEPT) }, missing: answer.missing };
+}
+
+/** What a box's builder states and no circuit tells. */
+const KEPT = ["signal", "polarity", "or"] as const;
+
+/** A conditioner's output as its circuit makes it; null for a jack that is none of its computed ones. */
+export function conditionerOutput(jack: JackModel, outcome: ConditionerOutcome): Partial<Output> | null {
+  if (jack.role !== "trigger-out" && jack.role !== "envelope-out") return null;
+  const stated = jack.output ?? {};
+  const found = jack.role === "envelope-out" ? outcome.envelope : outcome.trigger;
+  return { ...signalOf(jack), ...withoutBlanks(stated), ...withoutBlanks(found ?? {}), ...pick(stated, KEPT) };
+}
+
+function signalOf(jack: JackModel): Pick<Output, "signal"> {
+  return { signal: jack.role === "envelope-out" ? "envelope" : "trigger" };
 }
 
 /** An input's figures; limits that follow its supply are taken at the supply's lowest. */

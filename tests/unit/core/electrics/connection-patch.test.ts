@@ -105,6 +105,27 @@ describe("a patch, from pad to desk", () => {
   });
 });
 
+describe("boxes that are free in a song", () => {
+  it("a bare pad on a voice is led through a free conditioner that it fires", () => {
+    const check = checkPatch(rig, plug([lead(1, "p1.out", "v1.in")]), standIn());
+    expect(check.leads.l1!.verdict).toBe("wrong-kind");
+    expect(check.leads.l1!.fixes).toMatchObject([{ kind: "conditioner", gearId: "c1", verdict: "good", feedVerdict: "good" }]);
+    expect(checkPatch(rig, plug([lead(1, "p2.out", "v1.in")]), standIn()).leads.l1!.fixes).toEqual([]);
+  });
+  it("a trigger on an envelope input goes through a free shaper, until that is taken", () => {
+    const shaper: GearModel = { id: "s", kind: "shaper", name: "Long tail", jacks: [into("s.in", triggerIn), out("s.out", { signal: "envelope", restV: 0, activeV: 5, sourceOhm: 1e3, decayS: 0.2 })], assumed: [] };
+    const wants = voice("e", { accepts: ["envelope"], onV: undefined, pulseS: undefined, decayS: { min: 0.1 } });
+    const gear = { gear: [...rig.gear, shaper, wants] };
+    const leads = [...patch.leads.slice(0, 1), lead(7, "c1.trig", "e.in")];
+    const before = checkPatch(gear, plug(leads), standIn());
+    expect(before.leads.l7!.fixes).toMatchObject([{ kind: "shaper", gearId: "s" }]);
+    const taken = plug([...leads, lead(8, "v3.out", "s.in")]);
+    const after = recheckPatch(before, gear, taken, [], standIn());
+    expect(after.leads.l7!.fixes).toEqual([]);
+    expect(after).toEqual(checkPatch(gear, taken, standIn()));
+  });
+});
+
 describe("what cannot be known says so", () => {
   it("no pad on the conditioner", () => {
     const check = checkPatch(rig, plug([patch.leads[1]!]), standIn());
