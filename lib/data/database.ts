@@ -3,22 +3,17 @@ import { Transaction, type Sequelize } from "sequelize";
 import { env } from "@/lib/env";
 import { openDatabase } from "@/models";
 
-interface Held {
-  sequelize: Sequelize;
-  queue: Promise<unknown>;
-}
-
-/* Next evaluates this module once a bundle; the file must be opened once a process. */
-const holder = globalThis as typeof globalThis & { __knockwireDatabase?: Held };
-
-function held(): Held {
-  holder.__knockwireDatabase ??= { sequelize: openDatabase(env().DATABASE_FILE), queue: Promise.resolve() };
-  return holder.__knockwireDatabase;
-}
+/*
+ * Next evaluates this module, and the models, once a bundle: pages and route handlers each have their own.
+ * Models belong to the connection that readied them, so each bundle opens the file; the turns to write are one a process.
+ */
+let opened: Sequelize | undefined;
+const holder = globalThis as typeof globalThis & { __knockwireWrites?: Promise<unknown> };
 
 /** The open database with its models ready; call before the first query of a verb. */
 export function database(): Sequelize {
-  return held().sequelize;
+  opened ??= openDatabase(env().DATABASE_FILE);
+  return opened;
 }
 
 /**
@@ -26,15 +21,16 @@ export function database(): Sequelize {
  * IMMEDIATE transaction, so SQLite never sees two writers of ours at once.
  */
 export function writeTx<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
-  const current = held();
-  const turn = current.queue.then(() => current.sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, work));
-  current.queue = turn.catch(() => undefined);
+  const sequelize = database();
+  const before = holder.__knockwireWrites ?? Promise.resolve();
+  const turn = before.then(() => sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, work));
+  holder.__knockwireWrites = turn.catch(() => undefined);
   return turn;
 }
 
 /** Closes the file; for tests and scripts. */
 export async function closeDatabase(): Promise<void> {
-  await held().queue;
-  await held().sequelize.close();
-  delete holder.__knockwireDatabase;
+  await holder.__knockwireWrites;
+  await opened?.close();
+  opened = undefined;
 }
