@@ -5,6 +5,16 @@ import { idSchema, revisionSchema } from "./identity";
 export const LEAD_COLOURS = ["black", "white", "red", "orange", "yellow", "green", "blue", "violet", "grey", "brown"] as const;
 export const leadColourSchema = z.enum(LEAD_COLOURS);
 
+const resistance = () => z.number().min(1).max(1e9);
+
+/** Parts soldered into a lead at its input end: how a fix becomes part of the patch. */
+export const inlineSchema = z.discriminatedUnion("kind", [
+  z.strictObject({ kind: z.literal("divider"), seriesOhm: resistance(), shuntOhm: resistance() }),
+  z.strictObject({ kind: z.literal("series-resistor"), seriesOhm: resistance() }),
+  z.strictObject({ kind: z.literal("series-diode"), pullDownOhm: resistance().nullable() }),
+]);
+export type Inline = z.infer<typeof inlineSchema>;
+
 export const leadSchema = z.strictObject({
   id: idSchema,
   number: z.number().int().min(1).max(999),
@@ -12,6 +22,7 @@ export const leadSchema = z.strictObject({
   /** Jack ids: the output end and the input end. */
   outputId: idSchema,
   inputId: idSchema,
+  inline: inlineSchema.optional(),
 });
 export type Lead = z.infer<typeof leadSchema>;
 

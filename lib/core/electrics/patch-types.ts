@@ -63,8 +63,14 @@ export interface RigModel {
   gear: GearModel[];
 }
 
+/** Parts soldered into one lead, at its input end; how a fix becomes part of the patch. Resistors are ±5 %. */
+export type InlineParts =
+  | { kind: "divider"; seriesOhm: number; shuntOhm: number }
+  | { kind: "series-resistor"; seriesOhm: number }
+  | { kind: "series-diode"; pullDownOhm: number | null };
+
 export interface PatchModel {
-  leads: { id: string; number: number; outputId: string; inputId: string }[];
+  leads: { id: string; number: number; outputId: string; inputId: string; inline?: InlineParts }[];
   /** `position` 0…1. */
   knobs: { gearId: string; knobId: string; position: number }[];
 }

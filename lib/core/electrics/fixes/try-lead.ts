@@ -27,6 +27,15 @@ const BRANCH = "\u0000branch";
  * @param connection one driving output.
  */
 export function tryInLead(connection: Connection, place: number, parts: LeadParts): ListenerCheck | null {
+  const found = checkInLead(connection, place, parts);
+  if (!found || !found.joined || !isFit(found.check)) return found?.check ?? null;
+  const before = checkBare(connection).listeners.filter((_, i) => i !== place);
+  const after = checkBare(found.joined).listeners;
+  return before.some((was, i) => severityOf(after[i]?.verdict ?? "hot") > severityOf(was.verdict)) ? null : found.check;
+}
+
+/** The listener's check with the parts in place, whatever it does to the others; `joined` is the node as those see it, in a mult. */
+export function checkInLead(connection: Connection, place: number, parts: LeadParts): { check: ListenerCheck | null; joined: Connection | null } | null {
   const driver = connection.outputs.find((output) => output.signal !== "sensor");
   const listener = connection.inputs[place];
   if (!driver || !listener || driver.sourceOhm === undefined) return null;
@@ -34,24 +43,20 @@ export function tryInLead(connection: Connection, place: number, parts: LeadPart
   if (!output) return null;
   if (connection.inputs.length === 1) {
     const sourceOhm = add(driver.sourceOhm, parts.seriesOhm);
-    return first(checkBare({ outputs: [{ ...output, sourceOhm }], inputs: withShunt(listener, parts.shuntOhm) }).listeners);
+    return { check: first(checkBare({ outputs: [{ ...output, sourceOhm }], inputs: withShunt(listener, parts.shuntOhm) }).listeners), joined: null };
   }
   if (parts.diodeDropV) return null;
   return tryInMult(connection, place, output, listener, parts);
 }
 
-function tryInMult(connection: Connection, place: number, output: Partial<Output>, listener: Input, parts: LeadParts): ListenerCheck | null {
+function tryInMult(connection: Connection, place: number, output: Partial<Output>, listener: Input, parts: LeadParts): { check: ListenerCheck | null; joined: Connection } | null {
   const others = connection.inputs.filter((_, i) => i !== place);
   const joined: Connection = { outputs: connection.outputs, inputs: [...others, branchLoad(listener, parts)] };
   const node = buildNode(joined);
   if (!node.highV || !node.lowV) return null;
   const behind: Partial<Output> = { ...output, restV: node.lowV, activeV: node.highV, sourceOhm: parts.seriesOhm };
   delete behind.limitA;
-  const result = first(checkBare({ outputs: [behind], inputs: withShunt(listener, parts.shuntOhm) }).listeners);
-  if (!result || !isFit(result)) return result;
-  const before = checkBare(connection).listeners.filter((_, i) => i !== place);
-  const after = checkBare(joined).listeners;
-  return before.some((was, i) => severityOf(after[i]?.verdict ?? "hot") > severityOf(was.verdict)) ? null : result;
+  return { check: first(checkBare({ outputs: [behind], inputs: withShunt(listener, parts.shuntOhm) }).listeners), joined };
 }
 
 export function isFit(check: ListenerCheck | null): check is ListenerCheck & { highV: Range; lowV: Range } {
@@ -74,7 +79,7 @@ function withShunt(listener: Input, shuntOhm: Spread | null): Input[] {
 }
 
 /** The new branch as the common node sees it: any Thévenin equivalent of parts, load, bias and diodes lies in here. */
-function branchLoad(listener: Input, parts: LeadParts): Input {
+export function branchLoad(listener: Input, parts: LeadParts): Input {
   const series = toRange(parts.seriesOhm);
   const ends = [parts.shuntOhm, listener.loadOhm].filter((s): s is Spread => s !== null).map((s) => toRange(s).max);
   const volts = [0, listener.biasV ?? 0, listener.clamp?.lowV ?? 0, listener.clamp?.highV ?? 0].map(toRange);

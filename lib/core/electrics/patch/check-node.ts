@@ -3,6 +3,7 @@ import type { Connection, ListenerCheck } from "../connection-types";
 import type { Reason } from "../jacks";
 import { orderReasons } from "../judge/order-verdicts";
 import type { LeadCheck } from "../patch-types";
+import { checkBehind, inlineOf, withInlineLoads } from "./check-inline";
 import { cautionUnpowered } from "./caution-unpowered";
 import { findAssumed } from "./find-assumed";
 import { findCircuitPulse } from "./find-circuit-pulse";
@@ -42,8 +43,12 @@ function checkPadLead({ ask }: NodeContext, lead: Lead, { gear }: PlacedJack): B
 function checkElectric(context: NodeContext, node: PatchNode): Map<string, (leadId: string) => Bare> {
   const resolved = node.outputs.map((output) => resolveOutput(output, context.ask));
   const connection: Connection = { outputs: resolved.map((r) => r.figures), inputs: node.inputs.map(resolveInput) };
-  const check = checkConnection(connection, context.fixOptions);
-  return new Map(check.listeners.map((listener, place) => {
+  const inline = inlineOf(node);
+  const plain = inline.size === 0;
+  const check = checkConnection(withInlineLoads(connection, inline), plain ? context.fixOptions : { ...context.fixOptions, fixes: false });
+  return new Map(check.listeners.map((seen, place) => {
+    // Parts that cannot be followed are taken as not there, which the sentences then speak of.
+    const listener = inline.has(place) ? (checkBehind(connection, place, inline) ?? checkConnection(connection, { fixes: false }).listeners[place] ?? seen) : seen;
     const { gear } = node.inputs[place] as PlacedJack;
     const reasons = explainBlanks(node, resolved, listener.reasons);
     const fixes = [...listener.fixes, ...findCircuitPulse(context, node, connection, place, listener), ...findFreeConditioner(context, node, connection, place, listener)];
