@@ -8,9 +8,10 @@ export const leadColourSchema = z.enum(LEAD_COLOURS);
 const resistance = () => z.number().min(1).max(1e9);
 
 /** Parts soldered into a lead at its input end: how a fix becomes part of the patch. */
+const tolerance = () => z.number().min(0).max(0.5);
 export const inlineSchema = z.discriminatedUnion("kind", [
-  z.strictObject({ kind: z.literal("divider"), seriesOhm: resistance(), shuntOhm: resistance() }),
-  z.strictObject({ kind: z.literal("series-resistor"), seriesOhm: resistance() }),
+  z.strictObject({ kind: z.enum(["divider", "diode-divider"]), seriesOhm: resistance(), shuntOhm: resistance(), tol: tolerance() }),
+  z.strictObject({ kind: z.literal("series-resistor"), seriesOhm: resistance(), tol: tolerance() }),
   z.strictObject({ kind: z.literal("series-diode"), pullDownOhm: resistance().nullable() }),
 ]);
 export type Inline = z.infer<typeof inlineSchema>;

@@ -63,10 +63,10 @@ export interface RigModel {
   gear: GearModel[];
 }
 
-/** Parts soldered into one lead, at its input end; how a fix becomes part of the patch. Resistors are ±5 %. */
+/** Parts soldered into one lead, at its input end; how a fix becomes part of the patch. `tol` is the resistors' tolerance. */
 export type InlineParts =
-  | { kind: "divider"; seriesOhm: number; shuntOhm: number }
-  | { kind: "series-resistor"; seriesOhm: number }
+  | { kind: "divider" | "diode-divider"; seriesOhm: number; shuntOhm: number; tol: number }
+  | { kind: "series-resistor"; seriesOhm: number; tol: number }
   | { kind: "series-diode"; pullDownOhm: number | null };
 
 export interface PatchModel {

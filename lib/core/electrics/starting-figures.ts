@@ -54,11 +54,11 @@ export function startingGear(kind: StartingKind, variant: string | undefined, ma
   const assumed: string[] = [];
   const note = (path: string) => assumed.push(path);
   const details = stripSources(template.details, "details", note);
-  const jacks = template.jacks.map(({ key: _key, ...jack }) => {
+  const jacks = template.jacks.map((jack) => {
     const id = makeId();
-    const figures = jack.direction === "output" ? { output: jack.output } : { input: jack.input };
-    const [[side, values] = ["", null]] = Object.entries(figures);
-    return { ...jack, id, [side]: stripSources(values, `jacks.${id}`, note) };
+    const { name, connector, role, direction } = jack;
+    const figures = stripSources(direction === "output" ? jack.output : jack.input, `jacks.${id}`, note);
+    return { id, name, connector, role, direction, [direction]: figures };
   });
   const knobs = template.knobs.map((knob) => ({ ...knob, id: makeId() }));
   // stripSources replaces each {value, source} by its value, which is what `Plain` says; the walk itself cannot be typed.

@@ -4,7 +4,8 @@ import { branchLoad, checkInLead, type LeadParts } from "../fixes/try-lead";
 import type { InlineParts } from "../patch-types";
 import type { PatchNode } from "./index-patch";
 
-const RESISTOR_TOL = 0.05;
+/** Of the resistor that a series diode at an open input needs. */
+const PULL_DOWN_TOL = 0.05;
 
 /** Parts in the leads of a node, by the place of the input they stand in front of. */
 export function inlineOf(node: PatchNode): Map<number, LeadParts> {
@@ -18,10 +19,12 @@ export function inlineOf(node: PatchNode): Map<number, LeadParts> {
 }
 
 function partsOf(inline: InlineParts): LeadParts {
-  const resistor = (nominal: number) => ({ nominal, tol: RESISTOR_TOL });
-  if (inline.kind === "divider") return { seriesOhm: resistor(inline.seriesOhm), shuntOhm: resistor(inline.shuntOhm) };
-  if (inline.kind === "series-resistor") return { seriesOhm: resistor(inline.seriesOhm), shuntOhm: null };
-  return { seriesOhm: 0, shuntOhm: inline.pullDownOhm === null ? null : resistor(inline.pullDownOhm), diodeDropV: DIODE_DROP_V };
+  if (inline.kind === "series-diode") {
+    return { seriesOhm: 0, shuntOhm: inline.pullDownOhm === null ? null : { nominal: inline.pullDownOhm, tol: PULL_DOWN_TOL }, diodeDropV: DIODE_DROP_V };
+  }
+  const resistor = (nominal: number) => ({ nominal, tol: inline.tol });
+  const series = { seriesOhm: resistor(inline.seriesOhm), shuntOhm: inline.kind === "series-resistor" ? null : resistor(inline.shuntOhm) };
+  return inline.kind === "diode-divider" ? { ...series, diodeDropV: DIODE_DROP_V } : series;
 }
 
 /** The node as inputs without parts of their own see it: each lead with parts is one more load. */
