@@ -34,7 +34,7 @@ export function ConflictPanel({ mine, stored, supplyName, busy, onKeepMine, onTa
             <tbody>
               {rows.map((row) => (
                 <tr key={row.label}>
-                  <Th scope="row" className="border-b border-line-soft font-semibold">{row.label}</Th>
+                  <th scope="row" className="border-b border-line-soft px-2 py-2 align-top font-semibold">{row.label}</th>
                   <Td className="break-words">{row.mine}</Td>
                   <Td className="break-words">{row.stored}</Td>
                 </tr>

@@ -11,7 +11,7 @@ import { emptyOutput, toFormValues, type CircuitValues, type GearFormValues, typ
 import { BUILD_WORD, LEG_WORD, SENSOR_WORD, SOURCE_WORD } from "./gear-words";
 import { figuresOfPad } from "./jack-figures";
 import { makeId } from "./make-id";
-import { FoldedFigures, Group } from "./form-section";
+import { FoldedFigures, Group, HalfWidth } from "./form-section";
 
 /** The figures of the box itself, by its kind. */
 export function DetailsFields() {
@@ -32,7 +32,7 @@ function PadFields() {
   const { main, more } = figuresOfPad(sensor);
   return (
     <>
-      <SelectField path="details.sensor" label="What senses the hit" options={SENSOR_WORD} />
+      <HalfWidth><SelectField path="details.sensor" label="What senses the hit" options={SENSOR_WORD} /></HalfWidth>
       <FigureGrid paths={main.map((key) => `details.${key}`)} />
       <FoldedFigures paths={more.map((key) => `details.${key}`)} />
     </>
@@ -42,7 +42,7 @@ function PadFields() {
 function SupplyFields() {
   return (
     <>
-      <SelectField path="details.source" label="Where the power comes from" options={SOURCE_WORD} />
+      <HalfWidth><SelectField path="details.source" label="Where the power comes from" options={SOURCE_WORD} /></HalfWidth>
       <FigureGrid paths={["details.highV", "details.lowV", "details.ratingA"]} />
     </>
   );
@@ -75,7 +75,7 @@ function ConditionerFields() {
 
   return (
     <>
-      <SelectField path="details.build" label="How well it is known" options={BUILD_WORD} onPicked={changeBuild} />
+      <HalfWidth><SelectField path="details.build" label="How well it is known" options={BUILD_WORD} onPicked={changeBuild} /></HalfWidth>
       {build === "circuit" && circuit ? <CircuitFields hasEnvelope={circuit.envelope !== null} fillIn={fillIn} /> : (
         <p className="text-ink-soft">Its outputs count as read: give the figures at each output jack below.</p>
       )}
@@ -102,7 +102,7 @@ function CircuitFields({ hasEnvelope, fillIn }: { hasEnvelope: boolean; fillIn: 
   return (
     <>
       <Group title="Pad and its divider">
-        <SelectField path={`${PARTS}.padLeg`} label="Where the pad sits" options={LEG_WORD} />
+        <HalfWidth><SelectField path={`${PARTS}.padLeg`} label="Where the pad sits" options={LEG_WORD} /></HalfWidth>
         <FigureGrid paths={paths("divider", "ohm")} />
       </Group>
       <Group title="Coupling" path={`${PARTS}.coupling`}>

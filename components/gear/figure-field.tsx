@@ -1,14 +1,14 @@
 "use client";
 
 import clsx from "clsx";
-import { useController, useFormContext, useWatch, type FieldPath } from "react-hook-form";
+import { useFormContext, useWatch } from "react-hook-form";
 import { TextInput } from "@/components/ui/inputs";
 import { assumedPath } from "./assumed-paths";
 import { FieldShell } from "./field-shell";
 import { figureInfo } from "./figure-catalogue";
 import { readBack } from "./figure-text";
 import type { GearFormValues } from "./form-values";
-import { fieldId } from "./list-faults";
+import { useFormField } from "./use-form-field";
 
 const UNIT_SIGN = { V: "V", Ohm: "Ω", F: "F", s: "s", A: "A", dBu: "dBu" } as const;
 
@@ -17,13 +17,10 @@ export function FigureField({ path }: { path: string }) {
   const info = figureInfo(path);
   if (!info) throw new RangeError(`not a figure: ${path}`);
   const { control, getValues, setValue } = useFormContext<GearFormValues>();
-  const { field, fieldState } = useController({ control, name: path as FieldPath<GearFormValues> });
+  const { shared, id, error, text, change } = useFormField(path);
   const assumed = useWatch({ control, name: "assumed" });
   const key = assumedPath(path, getValues("jacks"));
   const isAssumed = assumed.includes(key);
-  const text = typeof field.value === "string" ? field.value : "";
-  const error = fieldState.error?.message;
-  const id = fieldId(path);
   const markAssumed = (on: boolean) =>
     setValue("assumed", on ? [...assumed, key] : assumed.filter((known) => known !== key), { shouldDirty: true });
 
@@ -38,9 +35,7 @@ export function FigureField({ path }: { path: string }) {
       mark={text.trim() === "" ? null : { on: isAssumed, set: markAssumed }}
     >
       <TextInput
-        id={id}
-        ref={field.ref}
-        name={field.name}
+        {...shared}
         value={text}
         autoComplete="off"
         autoCapitalize="off"
@@ -48,11 +43,9 @@ export function FigureField({ path }: { path: string }) {
         maxLength={60}
         placeholder={info.optional ? "not known" : undefined}
         className={clsx("font-mono tabular-nums", isAssumed && text.trim() !== "" && "border-dotted")}
-        aria-invalid={error ? true : undefined}
         aria-describedby={[`${id}-back`, error ? `${id}-error` : "", `${id}-help`].filter(Boolean).join(" ")}
-        onBlur={field.onBlur}
         onChange={(event) => {
-          field.onChange(event.target.value);
+          change(event.target.value);
           if (isAssumed) markAssumed(false);
         }}
       />

@@ -1,11 +1,12 @@
+import clsx from "clsx";
 import { AssumedMark } from "./assumed-mark";
 import type { ShownFigure } from "./view-figures";
 
 /** Figures to read: words, value, and whether anybody measured it. */
-export function FigureList({ figures }: { figures: ShownFigure[] }) {
+export function FigureList({ figures, narrow = false }: { figures: ShownFigure[]; narrow?: boolean }) {
   if (figures.length === 0) return null;
   return (
-    <dl className="grid grid-cols-1 gap-x-8 sm:grid-cols-2 lg:grid-cols-3">
+    <dl className={clsx("grid grid-cols-1 gap-x-8 self-start sm:grid-cols-2", narrow ? null : "lg:grid-cols-3")}>
       {figures.map((figure) => (
         <div key={figure.path} className="flex items-baseline justify-between gap-3 border-b border-line-soft py-1.5">
           <dt className="text-ink-soft">{figure.label}</dt>

@@ -26,11 +26,13 @@ export function showFigure(value: Spread | null | undefined, unit: FigureInfo["u
   return formatSpread(value, unit);
 }
 
-/** What the text is taken for, shown beside the field: `= 4.7 kΩ`. Empty while it cannot be read. */
+/** What the text is taken for, shown beside the field: `= 4.7 kΩ`. Empty while it cannot be read, or where it says just that already. */
 export function readBack(text: string, info: Pick<FigureInfo, "unit" | "spread">): string {
   if (text.trim() === "") return "";
   const parsed = readFigure(text, info);
-  return parsed.ok ? `= ${showFigure(parsed.value, info.unit)}` : "";
+  if (!parsed.ok) return "";
+  const shown = showFigure(parsed.value, info.unit);
+  return shown === text.trim() ? "" : `= ${shown}`;
 }
 
 export function sameSpread(a: Spread, b: Spread): boolean {

@@ -31,6 +31,11 @@ export function Group({ title, path, children }: { title: string; path?: string;
   );
 }
 
+/** A choice of a few words needs no more than half the form. */
+export function HalfWidth({ children }: { children: ReactNode }) {
+  return <div className="grid grid-cols-1 gap-x-6 sm:grid-cols-2">{children}</div>;
+}
+
 /** A fault of several fields together, such as a divider without any resistance. */
 export function GroupError({ path }: { path: string }) {
   const { control } = useFormContext<GearFormValues>();

@@ -13,7 +13,7 @@ import { draftKey } from "./draft-store";
 import { FaultSummary } from "./fault-summary";
 import { focusFirstFault } from "./focus-fault";
 import { FormSection } from "./form-section";
-import { KIND_HINT, KIND_WORD } from "./gear-words";
+import { isPowered, KIND_HINT, KIND_WORD } from "./gear-words";
 import { JacksSection } from "./jacks-section";
 import { KnobsSection } from "./knobs-section";
 import { LeaveDialog } from "./leave-dialog";
@@ -96,8 +96,10 @@ export function GearForm({ rigId, gear, start, draftId, supplies, pads }: GearFo
           />
         ) : null}
         <FormSection title={KIND_WORD[kind]} intro={KIND_HINT[kind]}>
-          <TextField path="name" label="Name, as it stands on its tape" />
-          {kind === "supply" ? null : <SelectField path="supplyId" label="Runs on" options={supplyOptions} />}
+          <div className="grid grid-cols-1 gap-x-6 gap-y-4 sm:grid-cols-2">
+            <TextField path="name" label="Name, as it stands on its tape" />
+            {isPowered(kind) ? <SelectField path="supplyId" label="Runs on" options={supplyOptions} /> : null}
+          </div>
           <DetailsFields />
           {kind === "conditioner" ? <ConditionerPreview pads={pads} /> : null}
         </FormSection>

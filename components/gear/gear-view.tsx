@@ -7,7 +7,7 @@ import type { Gear } from "@/lib/schemas/gear";
 import type { Jack } from "@/lib/schemas/jack";
 import { FigureList } from "./figure-list";
 import { GearPageActions } from "./gear-page-actions";
-import { BUILD_WORD, KIND_WORD, LEG_WORD, POLARITY_WORD, SENSOR_WORD, SIGNAL_SHORT, SOURCE_WORD, TURNS_WORD } from "./gear-words";
+import { BUILD_WORD, isPowered, KIND_WORD, LEG_WORD, POLARITY_WORD, SENSOR_WORD, SIGNAL_SHORT, SOURCE_WORD, TURNS_WORD } from "./gear-words";
 import { detailFigures, jackFigures } from "./view-figures";
 
 interface GearViewProps {
@@ -29,7 +29,7 @@ export function GearView({ rigId, gear, others, mayEdit, justSaved }: GearViewPr
       <header className="flex flex-wrap items-start justify-between gap-x-6 gap-y-3">
         <div className="flex min-w-0 flex-col gap-1">
           <p className="text-ink-soft"><Link className="underline" href={paths.gearList(rigId)}>Gear</Link> · {KIND_WORD[gear.kind]}{gear.retired ? " · retired" : ""}</p>
-          <Tape as="h1" size="large">{gear.name}</Tape>
+          <Tape as="h1" size="large" className="self-start">{gear.name}</Tape>
           <p className="text-ink-soft">{factsOf(gear).join(" · ")}</p>
         </div>
         {mayEdit ? (
@@ -62,24 +62,29 @@ export function GearView({ rigId, gear, others, mayEdit, justSaved }: GearViewPr
             <ul className="flex flex-wrap gap-3">{fed.map((other) => <li key={other.id}><Link href={paths.gear(rigId, other.id)}><Tape size="small">{other.name}</Tape></Link></li>)}</ul>
           )}
         </section>
-      ) : (
+      ) : null}
+      {isPowered(gear.kind) || supply ? (
         <section aria-labelledby="runs-on">
           <h2 id="runs-on" className="mb-2 text-xl font-bold">Runs on</h2>
           {supply ? <Link href={paths.gear(rigId, supply.id)}><Tape size="small">{supply.name}</Tape></Link> : <p className="text-ink-soft">Nothing recorded.</p>}
         </section>
-      )}
+      ) : null}
 
       {gear.kind === "supply" ? null : (
-        <section aria-labelledby="jacks" className="flex flex-col gap-4">
-          <h2 id="jacks" className="text-xl font-bold">Jacks</h2>
+        <section aria-labelledby="jacks">
+          <h2 id="jacks" className="mb-2 text-xl font-bold">Jacks</h2>
           {gear.jacks.length === 0 ? <p className="text-ink-soft">None recorded, so nothing can be patched into it.</p> : null}
-          {gear.jacks.map((jack) => (
-            <section key={jack.id} aria-label={jack.name} className="bg-bench p-4">
-              <h3 className="text-lg font-bold">{jack.name}</h3>
-              <p className="mb-2 text-ink-soft">{describeJack(jack, gear)}</p>
-              <FigureList figures={jackFigures(gear, jack)} />
-            </section>
-          ))}
+          <ul className="flex flex-col gap-3">
+            {gear.jacks.map((jack) => (
+              <li key={jack.id} className="grid gap-x-6 gap-y-2 bg-bench px-4 py-3 md:grid-cols-[15rem_1fr]">
+                <div>
+                  <h3 className="text-lg font-bold">{jack.name}</h3>
+                  <p className="text-ink-soft">{describeJack(jack, gear)}</p>
+                </div>
+                <FigureList figures={jackFigures(gear, jack)} narrow />
+              </li>
+            ))}
+          </ul>
         </section>
       )}
 

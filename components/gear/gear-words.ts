@@ -47,3 +47,6 @@ export const ROLE_WORD: Record<JackRole, string> = {
 };
 
 export const COLUMN_WORD = { name: "Name", kind: "Kind", figures: "Figures", assumed: "Assumed", supply: "Runs on", state: "State" } as const;
+
+/** Pads are bare contacts and desk channels have the desk's own power: only these run on a supply of the rig. */
+export const isPowered = (kind: GearKind): boolean => kind === "conditioner" || kind === "shaper" || kind === "voice";

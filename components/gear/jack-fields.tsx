@@ -23,6 +23,7 @@ export function JackFields({ index }: { index: number }) {
   const base = `jacks.${index}`;
   const side = `${base}.${jack.direction}`;
   const { main, more, note } = figuresOfJack(jack, details);
+  const bare = jack.direction === "output" ? jack.output.signal === "sensor" : jack.input.accepts.every((signal) => signal === "sensor");
   const at = (keys: readonly string[]) => keys.map((key) => `${side}.${key}`);
 
   const turnAround = (direction: string) => {
@@ -45,16 +46,18 @@ export function JackFields({ index }: { index: number }) {
         <>
           <div className="grid grid-cols-1 gap-x-5 gap-y-4 sm:grid-cols-2">
             <SelectField path={`${side}.signal`} label="What comes out" options={SIGNAL_WORD} />
-            <SelectField path={`${side}.polarity`} label="Polarity" options={POLARITY_WORD} />
+            {bare ? null : <SelectField path={`${side}.polarity`} label="Polarity" options={POLARITY_WORD} />}
           </div>
-          <FormCheck path={`${side}.or`} label="It leaves through a diode, so that several may share an input" />
+          {bare ? null : <FormCheck path={`${side}.or`} label="It leaves through a diode, so that several may share an input" />}
         </>
       ) : (
         <>
           <AcceptsField path={`${side}.accepts`} index={index} accepts={jack.input.accepts} />
-          <div className="grid grid-cols-1 gap-x-5 gap-y-4 sm:grid-cols-2">
-            <SelectField path={`${side}.polarity`} label="Polarity it waits for" options={POLARITY_WORD} />
-          </div>
+          {bare ? null : (
+            <div className="grid grid-cols-1 gap-x-5 gap-y-4 sm:grid-cols-2">
+              <SelectField path={`${side}.polarity`} label="Polarity it waits for" options={POLARITY_WORD} />
+            </div>
+          )}
         </>
       )}
       {note ? <p className="text-ink-soft">{note}</p> : null}
@@ -62,7 +65,7 @@ export function JackFields({ index }: { index: number }) {
       {jack.direction === "input" && jack.input.accepts.includes("audio") ? (
         <FormCheck path={`${side}.phantom`} label="Phantom power is switched on for this channel" />
       ) : null}
-      {jack.direction === "input" && !jack.input.accepts.every((signal) => signal === "sensor") ? (
+      {jack.direction === "input" && !bare ? (
         <>
           <Checkbox
             id={fieldId(`${side}.clamp`)}

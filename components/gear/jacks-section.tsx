@@ -38,7 +38,7 @@ export function JacksSection({ kind }: { kind: GearKind }) {
                 <legend className="px-2 font-bold">{title}</legend>
                 <JackFields index={index} />
                 <div className="mt-3 flex justify-end">
-                  <Button tone="danger" aria-label={`Remove ${title}`} onClick={() => takeAway(index, title)}>Remove this {direction}</Button>
+                  <Button tone="quiet" aria-label={`Remove ${title}`} onClick={() => takeAway(index, title)}>Remove this {direction}</Button>
                 </div>
               </fieldset>
             </li>

@@ -26,7 +26,7 @@ export function KnobsSection({ turnsMatter }: { turnsMatter: boolean }) {
           <li key={field.fieldKey} className="grid grid-cols-1 items-end gap-x-6 gap-y-2 sm:grid-cols-[1fr_auto] lg:grid-cols-3">
             <TextField path={`knobs.${index}.name`} label={`Knob ${index + 1}`} />
             {turnsMatter ? <SelectField path={`knobs.${index}.turns`} label={`What knob ${index + 1} turns`} options={TURNS_WORD} /> : null}
-            <Button tone="danger" className="w-fit" aria-label={`Remove knob ${index + 1}`} onClick={() => takeAway(index)}>Remove</Button>
+            <Button tone="quiet" className="w-fit" aria-label={`Remove knob ${index + 1}`} onClick={() => takeAway(index)}>Remove</Button>
           </li>
         ))}
       </ol>

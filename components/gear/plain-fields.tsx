@@ -1,35 +1,12 @@
 "use client";
 
-import { useController, useFormContext, type FieldPath } from "react-hook-form";
 import { Checkbox, Select, TextArea, TextInput } from "@/components/ui/inputs";
 import { FieldShell } from "./field-shell";
-import type { GearFormValues } from "./form-values";
-import { fieldId } from "./list-faults";
+import { useFormField } from "./use-form-field";
 
 interface PathProps {
   path: string;
   label: string;
-}
-
-function useField(path: string) {
-  const { control } = useFormContext<GearFormValues>();
-  const { field, fieldState } = useController({ control, name: path as FieldPath<GearFormValues> });
-  const id = fieldId(path);
-  const error = fieldState.error?.message;
-  return {
-    field,
-    error,
-    shared: {
-      id,
-      ref: field.ref,
-      name: field.name,
-      value: typeof field.value === "string" ? field.value : "",
-      onBlur: field.onBlur,
-      onChange: field.onChange,
-      "aria-invalid": error ? true : undefined,
-      "aria-describedby": error ? `${id}-error` : undefined,
-    },
-  };
 }
 
 interface TextFieldProps extends PathProps {
@@ -40,11 +17,11 @@ interface TextFieldProps extends PathProps {
 }
 
 export function TextField({ path, label, inputMode, narrow, lines }: TextFieldProps) {
-  const { shared, error } = useField(path);
+  const { shared, id, error, text, change } = useFormField(path);
   return (
-    <FieldShell id={shared.id} label={label} error={error}>
-      {lines ? <TextArea {...shared} rows={lines} maxLength={2000} />
-        : <TextInput {...shared} inputMode={inputMode} autoComplete="off" maxLength={120} className={narrow ? "max-w-32" : undefined} />}
+    <FieldShell id={id} label={label} error={error}>
+      {lines ? <TextArea {...shared} value={text} onChange={(event) => change(event.target.value)} rows={lines} maxLength={2000} />
+        : <TextInput {...shared} value={text} onChange={(event) => change(event.target.value)} inputMode={inputMode} autoComplete="off" maxLength={120} className={narrow ? "max-w-32" : undefined} />}
     </FieldShell>
   );
 }
@@ -55,13 +32,14 @@ interface SelectFieldProps extends PathProps {
 }
 
 export function SelectField({ path, label, options, onPicked }: SelectFieldProps) {
-  const { shared, error } = useField(path);
+  const { shared, id, error, text, change } = useFormField(path);
   return (
-    <FieldShell id={shared.id} label={label} error={error}>
+    <FieldShell id={id} label={label} error={error}>
       <Select
         {...shared}
+        value={text}
         onChange={(event) => {
-          shared.onChange(event.target.value);
+          change(event.target.value);
           onPicked?.(event.target.value);
         }}
       >
@@ -73,6 +51,6 @@ export function SelectField({ path, label, options, onPicked }: SelectFieldProps
 
 /** A yes-or-no that the form holds. */
 export function FormCheck({ path, label }: PathProps) {
-  const { field } = useField(path);
-  return <Checkbox id={fieldId(path)} label={label} checked={field.value === true} onChange={(event) => field.onChange(event.target.checked)} />;
+  const { id, isOn, change } = useFormField(path);
+  return <Checkbox id={id} label={label} checked={isOn} onChange={(event) => change(event.target.checked)} />;
 }

@@ -132,6 +132,7 @@ describe("reading back", () => {
     expect(readBack("20k–50k", ohm)).toBe("= 20–50 kΩ");
     expect(readBack("0.01 µF", { unit: "F", spread: false })).toBe("= 10 nF");
     expect(readBack("10k ±5%", ohm)).toBe("= 10 kΩ ±5 %");
+    expect(readBack("10 kΩ", ohm)).toBe("");
     expect(readBack("4k7 volts", ohm)).toBe("");
     expect(readBack("20k–50k", { unit: "Ohm", spread: false })).toBe("");
     expect(readBack("-10 dBu", { unit: "dBu", spread: false })).toBe("= −10 dBu");
