@@ -2,6 +2,6 @@
 
 import type { Gear } from "@/lib/schemas/gear";
 
-export function ConditionerPreview({ pads }: { pads: Gear[] }) {
-  return pads.length < 0 ? <p /> : null;
+export function ConditionerPreview({ pads, supplies }: { pads: Gear[]; supplies: unknown[] }) {
+  return pads.length + supplies.length < 0 ? <p /> : null;
 }

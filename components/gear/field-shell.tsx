@@ -7,6 +7,8 @@ interface FieldShellProps {
   unit?: string;
   error?: string;
   help?: string;
+  /** Where an assumed figure was taken from. */
+  source?: string;
   readBack?: string;
   /** Null: the box is empty, there is nothing to assume. */
   mark?: { on: boolean; set: (on: boolean) => void } | null;
@@ -14,7 +16,7 @@ interface FieldShellProps {
 }
 
 /** A label over its control; beneath, what was read, whether it is assumed, what is wrong, and how to measure it. */
-export function FieldShell({ id, label, unit, error, help, readBack, mark, children }: FieldShellProps) {
+export function FieldShell({ id, label, unit, error, help, source, readBack, mark, children }: FieldShellProps) {
   return (
     <div className="flex min-w-0 flex-col gap-1">
       <label htmlFor={id} className="flex items-baseline justify-between gap-2 font-semibold">
@@ -22,7 +24,7 @@ export function FieldShell({ id, label, unit, error, help, readBack, mark, child
         {unit ? <span className="font-mono text-sm font-normal text-ink-soft">{unit}</span> : null}
       </label>
       {children}
-      {readBack !== undefined ? (
+      {readBack || mark ? (
         <div className="flex min-h-8 items-center justify-between gap-3 text-sm">
           <span id={`${id}-back`} className="font-mono text-ink-soft tabular-nums">{readBack}</span>
           {mark ? (
@@ -40,6 +42,7 @@ export function FieldShell({ id, label, unit, error, help, readBack, mark, child
         <details className="text-sm">
           <summary className="w-fit py-1 text-ink-soft underline decoration-dotted underline-offset-4" aria-label={`How to measure: ${label}`}>How to measure</summary>
           <p id={`${id}-help`} className="pt-1">{help}</p>
+          {source ? <p className="pt-1 text-ink-soft">The starting figure: {source}.</p> : null}
         </details>
       ) : null}
     </div>

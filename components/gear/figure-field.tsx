@@ -1,6 +1,7 @@
 "use client";
 
 import clsx from "clsx";
+import { createContext, useContext } from "react";
 import { useFormContext, useWatch } from "react-hook-form";
 import { TextInput } from "@/components/ui/inputs";
 import { assumedPath } from "./assumed-paths";
@@ -12,6 +13,9 @@ import { useFormField } from "./use-form-field";
 
 const UNIT_SIGN = { V: "V", Ohm: "Ω", F: "F", s: "s", A: "A", dBu: "dBu" } as const;
 
+/** Where starting figures are from, by assumed path; empty for gear that is already stored. */
+export const StartSources = createContext<Readonly<Record<string, string>>>({});
+
 /** One electrical figure: what was typed, what it is taken for, whether it is assumed, and how to measure it. */
 export function FigureField({ path }: { path: string }) {
   const info = figureInfo(path);
@@ -21,6 +25,8 @@ export function FigureField({ path }: { path: string }) {
   const assumed = useWatch({ control, name: "assumed" });
   const key = assumedPath(path, getValues("jacks"));
   const isAssumed = assumed.includes(key);
+  const source = useContext(StartSources)[key];
+  const back = readBack(text, info);
   const markAssumed = (on: boolean) =>
     setValue("assumed", on ? [...assumed, key] : assumed.filter((known) => known !== key), { shouldDirty: true });
 
@@ -31,7 +37,8 @@ export function FigureField({ path }: { path: string }) {
       unit={UNIT_SIGN[info.unit]}
       error={error}
       help={info.help}
-      readBack={readBack(text, info)}
+      source={isAssumed ? source : undefined}
+      readBack={back}
       mark={text.trim() === "" ? null : { on: isAssumed, set: markAssumed }}
     >
       <TextInput
@@ -43,7 +50,7 @@ export function FigureField({ path }: { path: string }) {
         maxLength={60}
         placeholder={info.optional ? "not known" : undefined}
         className={clsx("font-mono tabular-nums", isAssumed && text.trim() !== "" && "border-dotted")}
-        aria-describedby={[`${id}-back`, error ? `${id}-error` : "", `${id}-help`].filter(Boolean).join(" ")}
+        aria-describedby={[back ? `${id}-back` : "", error ? `${id}-error` : "", `${id}-help`].filter(Boolean).join(" ")}
         onChange={(event) => {
           change(event.target.value);
           if (isAssumed) markAssumed(false);

@@ -22,7 +22,7 @@ export function GearCards({ rows, actions }: { rows: GearRow[]; actions: RowActi
             <AssumedCount count={row.assumed} words />
             {row.supply ? ` · runs on ${row.supply}` : ""}
           </p>
-          <GearRowActions gear={row.gear} actions={actions} />
+          <div className="-ml-1.5"><GearRowActions gear={row.gear} actions={actions} /></div>
         </li>
       ))}
     </ul>

@@ -32,6 +32,14 @@ interface Said {
 
 const plural = (n: number, one: string, many: string) => `${n} ${n === 1 ? one : many}`;
 
+const countWords = (inUse: number, retired: number, assumed: number): string =>
+  [
+    plural(inUse, "piece in use", "pieces in use"),
+    retired > 0 ? `, ${retired} retired` : "",
+    assumed > 0 ? `; ${plural(assumed, "figure is", "figures are")} still assumed` : "",
+    ".",
+  ].join("");
+
 /** Everything the rig owns, to find, sort, copy and retire. */
 export function GearList({ rigId, gear, can }: GearListProps) {
   const { query, change, sortBy } = useGearQuery();
@@ -73,11 +81,9 @@ export function GearList({ rigId, gear, can }: GearListProps) {
     <div className="mx-auto max-w-6xl">
       <PageHeader
         title="Gear"
-        actions={mayAdd ? <ButtonLink tone="primary" href={paths.newGear(rigId)}>{can.editGear ? "Add gear" : "Add a desk channel"}</ButtonLink> : null}
+        actions={mayAdd && gear.length > 0 ? <ButtonLink tone="primary" href={paths.newGear(rigId)}>{can.editGear ? "Add gear" : "Add a desk channel"}</ButtonLink> : null}
       >
-        {plural(inUse.length, "piece in use", "pieces in use")}
-        {gear.length > inUse.length ? `, ${gear.length - inUse.length} retired` : ""}
-        {assumed > 0 ? `; ${plural(assumed, "figure is", "figures are")} still assumed` : ""}.
+        {gear.length > 0 ? countWords(inUse.length, gear.length - inUse.length, assumed) : null}
       </PageHeader>
 
       {said ? (

@@ -16,11 +16,11 @@ export function GearRowActions({ gear, actions }: { gear: Gear; actions: RowActi
   if (!actions.mayEdit(gear)) return null;
   const busy = actions.busyId === gear.id;
   return (
-    <div className="flex flex-wrap gap-2">
-      <Button tone="quiet" disabled={busy} aria-label={`Copy ${gear.name}`} onClick={() => actions.onCopy(gear)}>Copy</Button>
+    <div className="flex gap-2">
+      <Button tone="quiet" className="px-1.5!" disabled={busy} aria-label={`Copy ${gear.name}`} onClick={() => actions.onCopy(gear)}>Copy</Button>
       {gear.retired
-        ? <Button tone="quiet" disabled={busy} aria-label={`Bring back ${gear.name}`} onClick={() => actions.onBringBack(gear)}>Bring back</Button>
-        : <Button tone="quiet" disabled={busy} aria-label={`Retire ${gear.name}`} onClick={() => actions.onRetire(gear)}>Retire</Button>}
+        ? <Button tone="quiet" className="px-1.5!" disabled={busy} aria-label={`Bring back ${gear.name}`} onClick={() => actions.onBringBack(gear)}>Bring back</Button>
+        : <Button tone="quiet" className="px-1.5!" disabled={busy} aria-label={`Retire ${gear.name}`} onClick={() => actions.onRetire(gear)}>Retire</Button>}
     </div>
   );
 }

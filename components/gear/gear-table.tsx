@@ -32,7 +32,7 @@ export function GearTable({ rows, query, sortBy, actions }: GearTableProps) {
           {rows.map((row) => (
             <tr key={row.gear.id} className={row.gear.retired ? "text-ink-soft" : undefined}>
               <th scope="row" className="border-b border-line-soft px-2 py-1.5 align-top">
-                <Link href={paths.gear(actions.rigId, row.gear.id)} className="inline-block max-w-72"><Tape size="small">{row.gear.name}</Tape></Link>
+                <Link href={paths.gear(actions.rigId, row.gear.id)} className="inline-block min-w-32 max-w-72"><Tape size="small">{row.gear.name}</Tape></Link>
               </th>
               <Td className="whitespace-nowrap">{row.kind}</Td>
               <Td className="max-w-96">{row.figures || "—"}</Td>

@@ -81,7 +81,7 @@ export function GearView({ rigId, gear, others, mayEdit, justSaved }: GearViewPr
                   <h3 className="text-lg font-bold">{jack.name}</h3>
                   <p className="text-ink-soft">{describeJack(jack, gear)}</p>
                 </div>
-                <FigureList figures={jackFigures(gear, jack)} narrow />
+                {isComputed(jack, gear) ? null : <FigureList figures={jackFigures(gear, jack)} narrow />}
               </li>
             ))}
           </ul>
@@ -117,14 +117,18 @@ function factsOf({ details, revision }: Gear): string[] {
   return [...facts, `revision ${revision}`];
 }
 
+/** A circuit's own outputs follow from its parts; what may be typed at them does not count. */
+function isComputed(jack: Jack, { details }: Gear): boolean {
+  return details.kind === "conditioner" && details.build === "circuit" && (jack.role === "trigger-out" || jack.role === "envelope-out");
+}
+
 function describeJack(jack: Jack, gear: Gear): string {
   const parts: string[] = [jack.direction === "output" ? "Output" : "Input", jack.connector];
   if (jack.direction === "output") {
     parts.push(SIGNAL_SHORT[jack.output.signal]);
     if (jack.output.polarity === "falling") parts.push(POLARITY_WORD.falling.toLowerCase());
     if (jack.output.or) parts.push("through a diode");
-    const byParts = gear.details.kind === "conditioner" && gear.details.build === "circuit";
-    if (byParts && (jack.role === "trigger-out" || jack.role === "envelope-out")) parts.push("computed from the circuit and the pad plugged in");
+    if (isComputed(jack, gear)) parts.push("computed from the circuit and the pad plugged in");
   } else {
     parts.push(`listens to ${jack.input.accepts.map((signal) => SIGNAL_SHORT[signal]).join(", ")}`);
     if (jack.input.polarity === "falling") parts.push(POLARITY_WORD.falling.toLowerCase());

@@ -6,7 +6,7 @@ import { CONNECTORS, type JackRole } from "@/lib/schemas/jack";
 import { SIGNALS, type Signal } from "@/lib/core/electrics/jacks";
 import { FigureGrid } from "./figure-field";
 import { FormCheck, SelectField, TextField } from "./plain-fields";
-import { FoldedFigures, GroupError } from "./form-section";
+import { FoldedFigures, GroupError, HalfWidth } from "./form-section";
 import { emptyClamp, emptyInput, emptyOutput, type GearFormValues, type JackValues } from "./form-values";
 import { POLARITY_WORD, ROLE_WORD, SIGNAL_WORD } from "./gear-words";
 import { CLAMP_FIGURES, figuresOfJack } from "./jack-figures";
@@ -23,7 +23,9 @@ export function JackFields({ index }: { index: number }) {
   const base = `jacks.${index}`;
   const side = `${base}.${jack.direction}`;
   const { main, more, note } = figuresOfJack(jack, details);
-  const bare = jack.direction === "output" ? jack.output.signal === "sensor" : jack.input.accepts.every((signal) => signal === "sensor");
+  const signals: readonly Signal[] = jack.direction === "output" ? [jack.output.signal] : jack.input.accepts;
+  // A bare contact and a sound have no edge: polarity and diodes say nothing about them.
+  const hasEdge = signals.some((signal) => signal !== "sensor" && signal !== "audio");
   const at = (keys: readonly string[]) => keys.map((key) => `${side}.${key}`);
 
   const turnAround = (direction: string) => {
@@ -35,7 +37,7 @@ export function JackFields({ index }: { index: number }) {
   };
 
   return (
-    <div className="space-y-4">
+    <div className="flex flex-col gap-4">
       <div className="grid grid-cols-1 gap-x-5 gap-y-4 sm:grid-cols-2 xl:grid-cols-4">
         <TextField path={`${base}.name`} label="Name" />
         <SelectField path={`${base}.direction`} label="Direction" options={DIRECTION_WORD} onPicked={turnAround} />
@@ -46,18 +48,14 @@ export function JackFields({ index }: { index: number }) {
         <>
           <div className="grid grid-cols-1 gap-x-5 gap-y-4 sm:grid-cols-2">
             <SelectField path={`${side}.signal`} label="What comes out" options={SIGNAL_WORD} />
-            {bare ? null : <SelectField path={`${side}.polarity`} label="Polarity" options={POLARITY_WORD} />}
+            {hasEdge ? <SelectField path={`${side}.polarity`} label="Polarity" options={POLARITY_WORD} /> : null}
           </div>
-          {bare ? null : <FormCheck path={`${side}.or`} label="It leaves through a diode, so that several may share an input" />}
+          {hasEdge ? <FormCheck path={`${side}.or`} label="It leaves through a diode, so that several may share an input" /> : null}
         </>
       ) : (
         <>
           <AcceptsField path={`${side}.accepts`} index={index} accepts={jack.input.accepts} />
-          {bare ? null : (
-            <div className="grid grid-cols-1 gap-x-5 gap-y-4 sm:grid-cols-2">
-              <SelectField path={`${side}.polarity`} label="Polarity it waits for" options={POLARITY_WORD} />
-            </div>
-          )}
+          {hasEdge ? <HalfWidth><SelectField path={`${side}.polarity`} label="Polarity it waits for" options={POLARITY_WORD} /></HalfWidth> : null}
         </>
       )}
       {note ? <p className="text-ink-soft">{note}</p> : null}
@@ -65,7 +63,7 @@ export function JackFields({ index }: { index: number }) {
       {jack.direction === "input" && jack.input.accepts.includes("audio") ? (
         <FormCheck path={`${side}.phantom`} label="Phantom power is switched on for this channel" />
       ) : null}
-      {jack.direction === "input" && !bare ? (
+      {jack.direction === "input" && (hasEdge || jack.input.clamp) ? (
         <>
           <Checkbox
             id={fieldId(`${side}.clamp`)}

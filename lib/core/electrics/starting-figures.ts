@@ -79,6 +79,23 @@ export const startingFigureSources: Readonly<Record<string, Readonly<Record<stri
   }),
 );
 
+/**
+ * The same sources by the assumed paths of one piece of starting gear, to show beside its figures.
+ * @param jackIds ids of that gear's jacks, in the order `startingGear` gave them.
+ * @throws RangeError for a variant that the kind does not have.
+ */
+export function startingSourcesOf(kind: StartingKind, variant: string | undefined, jackIds: readonly string[]): Record<string, string> {
+  const template = templateOf(kind, variant);
+  const sources = startingFigureSources[`${kind}/${template.variant}`] ?? {};
+  return Object.fromEntries(
+    Object.entries(sources).map(([path, source]) => {
+      const [root, key, ...rest] = path.split(".");
+      const id = root === "jacks" ? jackIds[template.jacks.findIndex((jack) => jack.key === key)] : undefined;
+      return [id === undefined ? path : ["jacks", id, ...rest].join("."), source];
+    }),
+  );
+}
+
 function templateOf(kind: StartingKind, variant: string | undefined): GearTemplate {
   const found = TEMPLATES.find((template) => template.kind === kind && (variant === undefined || template.variant === variant));
   if (!found) throw new RangeError(`no starting figures for ${kind}/${variant}`);

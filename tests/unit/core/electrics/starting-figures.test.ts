@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { startingFigureSources, startingGear, startingVariants, type StartingKind } from "@/lib/core/electrics/starting-figures";
+import { startingFigureSources, startingGear, startingSourcesOf, startingVariants, type StartingKind } from "@/lib/core/electrics/starting-figures";
 import { GEAR_KINDS, gearInputSchema, type GearInput } from "@/lib/schemas/gear";
 import { toRange } from "@/lib/core/units/spread";
 
@@ -41,7 +41,9 @@ describe("startingGear", () => {
     const sources = startingFigureSources[`${kind}/${variant}`] ?? {};
     expect(Object.keys(sources)).toHaveLength(gear.assumed.length);
     for (const source of Object.values(sources)) expect(source.length).toBeGreaterThan(10);
-    for (const path of gear.assumed.filter((p) => p.startsWith("details."))) expect(sources).toHaveProperty([path]);
+    const byPath = startingSourcesOf(kind, variant, gear.jacks.map((jack) => jack.id));
+    expect(Object.keys(byPath).sort()).toEqual([...gear.assumed].sort());
+    expect(new Set(Object.values(byPath))).toEqual(new Set(Object.values(sources)));
   });
 
   it("takes the first variant when none is named, and ids only from the maker", () => {

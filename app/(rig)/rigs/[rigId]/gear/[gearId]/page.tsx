@@ -1,5 +1,6 @@
 import { GearForm } from "@/components/gear/gear-form";
 import { GearView } from "@/components/gear/gear-view";
+import { toSupplyChoices } from "@/components/gear/supply-choices";
 import { PageHeader } from "@/components/ui/page-header";
 import { Tape } from "@/components/ui/tape";
 import { requireActor } from "@/lib/auth/require-actor";
@@ -37,7 +38,7 @@ export default async function GearPage({ params, searchParams }: GearPageProps) 
         gear={gear}
         start={gear}
         draftId={gear.id}
-        supplies={others.filter((item) => item.kind === "supply" && (!item.retired || item.id === gear.supplyId)).map(({ id, name }) => ({ id, name }))}
+        supplies={toSupplyChoices(others.filter((item) => !item.retired || item.id === gear.supplyId))}
         pads={others.filter((item) => item.kind === "pad" && !item.retired)}
       />
     </div>

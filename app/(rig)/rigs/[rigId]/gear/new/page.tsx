@@ -3,8 +3,9 @@ import { notFound } from "next/navigation";
 import { GearForm } from "@/components/gear/gear-form";
 import { StartFrom, StartingChooser } from "@/components/gear/starting-chooser";
 import { startForRig } from "@/components/gear/start-for-rig";
+import { toSupplyChoices } from "@/components/gear/supply-choices";
 import { requireActor } from "@/lib/auth/require-actor";
-import { startingVariants } from "@/lib/core/electrics/starting-figures";
+import { startingSourcesOf, startingVariants } from "@/lib/core/electrics/starting-figures";
 import { listGear } from "@/lib/data/list-gear";
 import { loadRig } from "@/lib/data/load-rig";
 import { paths } from "@/lib/paths";
@@ -34,6 +35,7 @@ export default async function NewGearPage({ params, searchParams }: NewGearProps
   const variant = variants.find((known) => known.variant === asked.variant) ?? variants[0];
   if (!variant) notFound();
   const gear = await listGear(actor, rigId, { retired: "without" });
+  const start = startForRig(variant, gear, randomUUID);
   return (
     <div className="mx-auto max-w-5xl">
       <StartFrom rigId={rigId} kind={kind} chosen={variant.variant} />
@@ -41,9 +43,10 @@ export default async function NewGearPage({ params, searchParams }: NewGearProps
         key={`${kind}/${variant.variant}`}
         rigId={rigId}
         gear={null}
-        start={startForRig(variant, gear, randomUUID)}
+        start={start}
+        sources={startingSourcesOf(kind, variant.variant, start.jacks.map((jack) => jack.id))}
         draftId={`new:${kind}:${variant.variant}`}
-        supplies={gear.filter((item) => item.kind === "supply").map(({ id, name }) => ({ id, name }))}
+        supplies={toSupplyChoices(gear)}
         pads={gear.filter((item) => item.kind === "pad")}
       />
     </div>
