@@ -8,20 +8,25 @@ export interface Difference {
   label: string;
   mine: string;
   stored: string;
+  /** Who changed it since both began; null where that is not known. */
+  changedBy: "you" | "the other" | "both" | null;
 }
 
 type Spoken = Map<string, { label: string; text: string }>;
 
 /** What differs between what is in the form and what is stored, in words, in the order of the form. */
-export function describeDifference(mine: GearInput, stored: GearInput, supplyName: (id: string | null) => string): Difference[] {
+export function describeDifference(mine: GearInput, stored: GearInput, supplyName: (id: string | null) => string, base: GearInput | null = null): Difference[] {
   const left = speak(mine, supplyName);
   const right = speak(stored, supplyName);
+  const start = base ? speak(base, supplyName) : null;
   const keys = [...left.keys(), ...[...right.keys()].filter((key) => !left.has(key))];
   return keys.flatMap((key) => {
     const a = left.get(key);
     const b = right.get(key);
     if (a?.text === b?.text) return [];
-    return [{ label: a?.label ?? b?.label ?? key, mine: a?.text ?? "—", stored: b?.text ?? "—" }];
+    const before = start?.get(key)?.text;
+    const changedBy = !start ? null : before === b?.text ? "you" : before === a?.text ? "the other" : "both";
+    return [{ label: a?.label ?? b?.label ?? key, mine: a?.text ?? "—", stored: b?.text ?? "—", changedBy }];
   });
 }
 

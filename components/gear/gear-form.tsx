@@ -93,6 +93,9 @@ export function GearForm({ rigId, gear, start, draftId, supplies, pads, sources 
             <ConflictPanel
               mine={state.conflict.mine}
               stored={state.conflict.stored}
+              base={state.conflict.base}
+              merged={state.conflict.merged}
+              onMerge={() => void state.saveMerged()}
               supplyName={supplyName}
               busy={state.busy}
               onKeepMine={() => void state.submit(state.conflict?.stored.revision)}

@@ -7,9 +7,18 @@ import { gearInputSchema, type Gear, type GearInput } from "@/lib/schemas/gear";
 import { pruneAssumed } from "./assumed-paths";
 import { toFormValues, type GearFormValues } from "./form-values";
 import { formFieldOf } from "./server-faults";
+import { mergeGear, type MergedGear } from "./merge-gear";
 import { useSaveGear } from "./use-save-gear";
 
 export type GearFormApi = UseFormReturn<GearFormValues, unknown, GearInput>;
+
+interface Conflict {
+  mine: GearInput;
+  stored: Gear;
+  /** What both began from; null where the typing began from an older revision than this page knows. */
+  base: GearInput | null;
+  merged: MergedGear | null;
+}
 
 interface GearFormState {
   form: GearFormApi;
@@ -17,12 +26,14 @@ interface GearFormState {
   baseRevision: number;
   /** Why the last save was refused, beyond single fields. */
   refusal: string | null;
-  conflict: { mine: GearInput; stored: Gear } | null;
+  conflict: Conflict | null;
   /** What was in the form before the stored version was taken. */
   putAside: GearFormValues | null;
   /** Rises with every attempt that found faults, so that focus can follow. */
   faultyTries: number;
   submit: (baseRevision?: number) => Promise<void>;
+  /** Saves the stored version with what was typed put onto it. */
+  saveMerged: () => Promise<void>;
   takeStored: () => void;
   bringBack: () => void;
   restore: (values: GearFormValues, baseRevision: number) => void;
@@ -37,6 +48,7 @@ export function useGearForm(rigId: string, gear: Gear | null, start: GearInput, 
   const form = useForm<GearFormValues, unknown, GearInput>({ defaultValues: initial, resolver, mode: "onTouched", shouldFocusError: false });
   const { busy, save } = useSaveGear(rigId, gear?.id ?? null);
   const [baseRevision, setBaseRevision] = useState(gear?.revision ?? 0);
+  const [base, setBase] = useState<{ revision: number; gear: GearInput }>({ revision: gear?.revision ?? 0, gear: start });
   const [refusal, setRefusal] = useState<string | null>(null);
   const [conflict, setConflict] = useState<GearFormState["conflict"]>(null);
   const [putAside, setPutAside] = useState<GearFormValues | null>(null);
@@ -52,7 +64,9 @@ export function useGearForm(rigId: string, gear: Gear | null, start: GearInput, 
       setConflict(null);
       onSaved(outcome.gear);
     } else if (outcome.kind === "stale") {
-      setConflict({ mine, stored: outcome.stored });
+      const { stored } = outcome;
+      const began = base.revision === revision ? base.gear : null;
+      setConflict({ mine, stored, base: began, merged: began ? mergeGear(began, mine, stored) : null });
     } else {
       const known = outcome.faults.filter((fault) => showFault(form, formFieldOf(fault), fault.detail));
       setRefusal(known.length === 0 ? outcome.message : null);
@@ -65,11 +79,17 @@ export function useGearForm(rigId: string, gear: Gear | null, start: GearInput, 
     return form.handleSubmit((parsed) => send(parsed, revision), () => setFaultyTries((tries) => tries + 1))();
   };
 
+  const saveMerged = async (): Promise<void> => {
+    if (!conflict?.merged) return;
+    form.reset(toFormValues(conflict.merged.gear), { keepDefaultValues: true });
+    await submit(conflict.stored.revision);
+  };
   const takeStored = () => {
     if (!conflict) return;
     setPutAside(structuredClone(form.getValues()));
     form.reset(toFormValues(conflict.stored));
     setBaseRevision(conflict.stored.revision);
+    setBase({ revision: conflict.stored.revision, gear: conflict.stored });
     setConflict(null);
   };
   const bringBack = () => {
@@ -82,7 +102,7 @@ export function useGearForm(rigId: string, gear: Gear | null, start: GearInput, 
     if (gear) setBaseRevision(revision);
   };
 
-  return { form, busy, baseRevision, refusal, conflict, putAside, faultyTries, submit, takeStored, bringBack, restore };
+  return { form, busy, baseRevision, refusal, conflict, putAside, faultyTries, submit, saveMerged, takeStored, bringBack, restore };
 }
 
 /** Puts the server's word beside its field. False where the form has no such field. */
