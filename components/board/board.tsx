@@ -1,0 +1,234 @@
+"use client";
+import { arrayMove } from "@dnd-kit/sortable";
+import { useCallback, useEffect, useMemo, useState } from "react";
+import { leadChain, tidyLanes } from "@/lib/core/chart";
+import type { PatchCheck } from "@/lib/core/electrics/patch-types";
+import type { Can } from "@/lib/rights/can";
+import type { Gear } from "@/lib/schemas/gear";
+import type { Lead, Patch } from "@/lib/schemas/patch";
+import { useAnnounce } from "../ui/announcer";
+import { Notice } from "../ui/notice";
+import { BoardCanvas } from "./board-canvas";
+import { PluggingContext, type Plugging } from "./board-context";
+import { laneOf, lanesOf, orderCards, sideOf } from "./board-lanes";
+import { BoardToolbar } from "./board-toolbar";
+import { ConflictDialog } from "./conflict-dialog";
+import { namesOf } from "./describe-changes";
+import { FirstRun } from "./first-run";
+import { KnobDialog } from "./knob-dialog";
+import { LeadPanel } from "./lead-panel";
+import { PlugDialog } from "./plug-dialog";
+import { RunList } from "./run-list";
+import { useBoardKeys } from "./use-board-keys";
+import { useBoardLayout } from "./use-board-layout";
+import { useFrameWidth } from "./use-frame-width";
+import { useCandidates, usePatchCheck } from "./use-patch-check";
+import { usePatchEditor } from "./use-patch-editor";
+
+interface BoardProps {
+  rigId: string;
+  songId: string;
+  gear: Gear[];
+  patch: Patch;
+  revision: number;
+  check: PatchCheck;
+  can: Can;
+}
+
+/** Above so many cards, those without a lead in this song fold to their tape. */
+const MANY_CARDS = 12;
+const NARROW_PX = 760;
+
+export function Board(props: BoardProps) {
+  const { rigId, songId, gear, can } = props;
+  const canEdit = can.editPatch;
+  const announce = useAnnounce();
+  const editor = usePatchEditor(rigId, songId, { revision: props.revision, patch: props.patch }, canEdit);
+  const { patch, edit } = editor;
+  const { check, isChecking, failed } = usePatchCheck(rigId, songId, patch, { patch: props.patch, check: props.check });
+  const names = useMemo(() => namesOf(gear), [gear]);
+  const jacks = useMemo(() => new Map(gear.flatMap((item) => item.jacks.map((jack) => [jack.id, { jack, gear: item }] as const))), [gear]);
+
+  const [pickedLeadId, setPickedLeadId] = useState<string | null>(null);
+  const [pickedCardId, setPickedCardId] = useState<string | null>(null);
+  const [armed, setArmed] = useState<string | null>(null);
+  const [listFrom, setListFrom] = useState<string | null>(null);
+  const [knobsOf, setKnobsOf] = useState<string | null>(null);
+  const [view, setView] = useState<"board" | "runs">("board");
+  const [fits, setFits] = useState(true);
+  const [foldsFree, setFoldsFree] = useState(props.patch.leads.length > 0 && gear.length > MANY_CARDS);
+  const [unfolded, setUnfolded] = useState<ReadonlySet<string>>(new Set());
+  const [filter, setFilter] = useState("");
+  const [frameRef, frameWidth] = useFrameWidth();
+  const isNarrow = frameWidth > 0 && frameWidth < NARROW_PX;
+  const showsRuns = view === "runs" || isNarrow;
+
+  const cards = useMemo(() => orderCards(gear, patch.lanes), [gear, patch.lanes]);
+  const used = useMemo(() => new Set(patch.leads.flatMap((lead) => [jacks.get(lead.outputId)?.gear.id ?? "", jacks.get(lead.inputId)?.gear.id ?? ""])), [jacks, patch.leads]);
+  const shown = useMemo(() => {
+    const wanted = filter.trim().toLowerCase();
+    return wanted === "" ? cards : cards.filter((card) => used.has(card.id) || card.name.toLowerCase().includes(wanted));
+  }, [cards, filter, used]);
+  const folded = useMemo(() => new Set(foldsFree && filter === "" ? shown.filter((card) => !used.has(card.id) && !unfolded.has(card.id)).map((card) => card.id) : []), [filter, foldsFree, shown, unfolded, used]);
+  const { layout, scale } = useBoardLayout(shown, patch.leads, folded, frameWidth, fits);
+  const chain = useMemo(() => {
+    const picked = { leadIds: pickedLeadId ? [pickedLeadId] : [], cardIds: pickedCardId ? [pickedCardId] : [] };
+    if (!pickedLeadId && !pickedCardId) return null;
+    return leadChain(patch.leads.map((lead) => ({ id: lead.id, from: lead.outputId, to: lead.inputId })), gear.map((item) => ({ id: item.id, jacks: item.jacks.map((jack) => ({ id: jack.id, side: sideOf(jack.direction) })) })), picked);
+  }, [gear, patch.leads, pickedCardId, pickedLeadId]);
+
+  const from = listFrom ?? armed;
+  const candidates = useCandidates(rigId, songId, patch, from);
+  const picked = patch.leads.find((lead) => lead.id === pickedLeadId);
+
+  const plug = useCallback((a: string, b: string) => {
+    const [first, second] = [jacks.get(a), jacks.get(b)];
+    if (!first || !second || first.jack.direction === second.jack.direction) return;
+    const [outputId, inputId] = first.jack.direction === "output" ? [a, b] : [b, a];
+    edit({ type: "plug", id: crypto.randomUUID(), outputId, inputId });
+    announce(`Plugged ${names.jack(outputId)} into ${names.jack(inputId)}.`);
+    setArmed(null);
+    setListFrom(null);
+  }, [announce, edit, jacks, names]);
+
+  const unplug = useCallback((leadIds: readonly string[]) => {
+    if (leadIds.length === 0) return;
+    edit({ type: "unplug", leadIds });
+    announce(`${leadIds.length === 1 ? "Lead" : `${leadIds.length} leads`} unplugged. Control Z brings it back.`);
+  }, [announce, edit]);
+
+  const tap = useCallback((jackId: string) => {
+    setArmed((before) => {
+      if (before === null) return jackId;
+      if (before === jackId) return null;
+      if (jacks.get(before)?.jack.direction === jacks.get(jackId)?.jack.direction) return jackId;
+      queueMicrotask(() => plug(before, jackId));
+      return null;
+    });
+  }, [jacks, plug]);
+
+  const plugging = useMemo((): Plugging => {
+    const jack = from === null ? undefined : jacks.get(from)?.jack;
+    return {
+      from: from !== null && jack ? { jackId: from, side: sideOf(jack.direction) } : null,
+      would: candidates.would,
+      canEdit,
+      tap,
+      openList: setListFrom,
+      unplugJack: (jackId) => unplug(patch.leads.filter((lead) => lead.outputId === jackId || lead.inputId === jackId).map((lead) => lead.id)),
+    };
+  }, [candidates.would, canEdit, from, jacks, patch.leads, tap, unplug]);
+
+  const pickCard = useCallback((cardId: string) => {
+    if (folded.has(cardId)) {
+      setUnfolded((before) => new Set([...before, cardId]));
+      return;
+    }
+    setPickedLeadId(null);
+    setPickedCardId((before) => (before === cardId ? null : cardId));
+  }, [folded]);
+  const pickLead = useCallback((leadId: string) => {
+    setPickedCardId(null);
+    setPickedLeadId(leadId);
+  }, []);
+  const letGo = useCallback(() => {
+    setArmed(null);
+    setPickedCardId(null);
+    setPickedLeadId(null);
+  }, []);
+  const moveCard = useCallback((cardId: string, overId: string) => {
+    if (cardId === overId) return;
+    const ids = cards.map((card) => card.id);
+    const moved = arrayMove(cards, ids.indexOf(cardId), ids.indexOf(overId));
+    edit({ type: "lanes", lanes: lanesOf(moved) });
+  }, [cards, edit]);
+  const moveEnd = useCallback((leadId: string, inputId: string) => {
+    const lead = patch.leads.find((item) => item.id === leadId);
+    if (!lead || lead.inputId === inputId || patch.leads.some((item) => item.outputId === lead.outputId && item.inputId === inputId)) return;
+    const { inline: _parts, ...rest } = lead;
+    edit({ type: "replace", patch: { ...patch, leads: patch.leads.map((item) => (item.id === leadId ? { ...rest, inputId } : item)) } });
+  }, [edit, patch]);
+  const tidy = useCallback(() => {
+    const chartCards = cards.map((card) => ({ id: card.id, lane: laneOf(card.kind) ?? (0 as const), jacks: card.jacks.map((jack) => ({ id: jack.id, side: sideOf(jack.direction) })), gear: card }));
+    const tidied = tidyLanes(chartCards, patch.leads.map((lead) => ({ id: lead.id, from: lead.outputId, to: lead.inputId })));
+    edit({ type: "lanes", lanes: lanesOf(tidied.map((card) => card.gear)) });
+    announce("Cards put in the order in which their leads cross least.");
+  }, [announce, cards, edit, patch.leads]);
+
+  useBoardKeys({ onUndo: editor.undo, onRedo: editor.redo, onRuns: () => setView((before) => (before === "runs" ? "board" : "runs")), onEscape: letGo });
+  useEffect(() => {
+    if (pickedLeadId) document.querySelector<HTMLElement>("[data-lead-panel]")?.focus({ preventScroll: true });
+  }, [pickedLeadId]);
+
+  const leadLabel = useCallback((lead: Lead) => `${names.jack(lead.outputId)} → ${names.jack(lead.inputId)}`, [names]);
+  const gearName = useCallback((id: string) => gear.find((item) => item.id === id)?.name ?? "?", [gear]);
+  const choices = useMemo(() => {
+    const start = listFrom === null ? undefined : jacks.get(listFrom);
+    if (!start) return [];
+    const joined = new Set(patch.leads.filter((lead) => lead.outputId === listFrom || lead.inputId === listFrom).flatMap((lead) => [lead.outputId, lead.inputId]));
+    return cards.flatMap((card) => card.jacks.filter((jack) => jack.direction !== start.jack.direction && !joined.has(jack.id) && card.id !== start.gear.id && !card.retired).map((jack) => ({ jackId: jack.id, label: names.jack(jack.id) })));
+  }, [cards, jacks, listFrom, names, patch.leads]);
+
+  return (
+    <PluggingContext.Provider value={plugging}>
+      <div className={picked ? "pb-[60dvh]" : ""}>
+        <BoardToolbar
+          editor={editor} check={check} isChecking={isChecking} canEdit={canEdit} isNarrow={isNarrow} view={view} onView={setView} fits={fits} onFits={setFits}
+          foldsFree={foldsFree} onFolds={(folds) => {
+            setFoldsFree(folds);
+            setUnfolded(new Set());
+          }}
+          filter={filter} onFilter={setFilter} onTidy={tidy}
+        />
+        {failed ? <Notice tone="error" title="Not checked" live className="mb-3">The server did not answer the check. The verdicts shown are from before; they follow with the next change.</Notice> : null}
+        {editor.news ? <Notice tone="done" live className="mb-3">{editor.news} <button type="button" className="underline" onClick={editor.dismissNews}>Good</button></Notice> : null}
+        {armed ? <p role="status" className="mb-2 border-l-8 border-mark bg-bench px-3 py-1"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
+        <div ref={frameRef} className="w-full">
+          {cards.length === 0 || (patch.leads.length === 0 && canEdit) ? <FirstRun rigId={rigId} gear={gear} can={can} /> : null}
+          {showsRuns ? (
+            <div className="flex flex-col gap-5">
+              {isNarrow && canEdit ? <JackList cards={cards} armed={armed} onOpen={setListFrom} /> : null}
+              <RunList check={check} leads={patch.leads} gearName={gearName} leadLabel={leadLabel} pickedLeadId={pickedLeadId} onPick={pickLead} />
+            </div>
+          ) : (
+            <div className="overflow-x-auto overflow-y-hidden pb-3" tabIndex={-1}>
+              <BoardCanvas
+                cards={shown} layout={layout} scale={scale} patch={patch} check={check} names={names} chain={chain} pickedLeadId={pickedLeadId} pickedCardId={pickedCardId} canEdit={canEdit}
+                onPickLead={pickLead} onPickCard={pickCard} onKnobs={setKnobsOf} onUnplug={unplug} onJackDrag={setArmed} onPlug={plug} onMoveEnd={moveEnd} onMoveCard={moveCard}
+              />
+            </div>
+          )}
+        </div>
+      </div>
+      {picked ? (
+        <LeadPanel
+          lead={picked} from={names.jack(picked.outputId)} to={names.jack(picked.inputId)} check={check.leads[picked.id]} isChecking={isChecking}
+          input={inputFigures(jacks.get(picked.inputId)?.jack)} canEdit={canEdit} edit={edit} onClose={() => setPickedLeadId(null)}
+        />
+      ) : null}
+      <PlugDialog title={listFrom === null ? null : `Plug ${names.jack(listFrom)} into…`} choices={choices} would={candidates.would} isLoading={candidates.isLoading} onChoose={(jackId) => listFrom !== null && plug(listFrom, jackId)} onClose={() => setListFrom(null)} />
+      <KnobDialog gear={gear.find((item) => item.id === knobsOf) ?? null} knobs={patch.knobs} canEdit={canEdit} edit={edit} onClose={() => setKnobsOf(null)} />
+      <ConflictDialog conflict={editor.conflict} names={names} onSettle={editor.settle} />
+    </PluggingContext.Provider>
+  );
+}
+
+function inputFigures(jack: Gear["jacks"][number] | undefined) {
+  return jack?.direction === "input" ? jack.input : undefined;
+}
+
+/** On a phone: every output with a way to plug it, since there is no board to tap on. */
+function JackList({ cards, armed, onOpen }: { cards: readonly Gear[]; armed: string | null; onOpen: (jackId: string) => void }) {
+  return (
+    <details className="bg-bench p-3" open={armed !== null}>
+      <summary className="min-h-11 py-2 font-bold">Plug a lead</summary>
+      <ul className="flex flex-col">
+        {cards.flatMap((card) => card.jacks.filter((jack) => jack.direction === "output").map((jack) => (
+          <li key={jack.id}>
+            <button type="button" className="flex min-h-12 w-full items-center border-t border-line-soft px-1 text-left" onClick={() => onOpen(jack.id)}>{card.name} · {jack.name} →</button>
+          </li>
+        )))}
+      </ul>
+    </details>
+  );
+}

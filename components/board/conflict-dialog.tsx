@@ -1,0 +1,67 @@
+"use client";
+import { useState } from "react";
+import { Button } from "../ui/button";
+import { Dialog } from "../ui/dialog";
+import { describeKnob, describeLead, type Names } from "./describe-changes";
+import type { Conflict } from "./merge-patches";
+import type { OpenConflict } from "./use-patch-editor";
+
+interface ConflictDialogProps {
+  conflict: OpenConflict | null;
+  names: Names;
+  onSettle: (takeMine: ReadonlySet<string>) => void;
+}
+
+/** Two people changed the same thing: asks, one by one, whose stays. Everything else is already kept from both. */
+export function ConflictDialog({ conflict, names, onSettle }: ConflictDialogProps) {
+  const [mine, setMine] = useState<ReadonlySet<string>>(new Set());
+  if (!conflict) return null;
+  const { conflicts } = conflict.merge;
+  const choose = (id: string, takeMine: boolean) => setMine((before) => {
+    const next = new Set(before);
+    if (takeMine) next.add(id);
+    else next.delete(id);
+    return next;
+  });
+  return (
+    <Dialog
+      open
+      title="Somebody else changed the same thing"
+      onClose={() => onSettle(mine)}
+      footer={
+        <>
+          <Button onClick={() => onSettle(new Set())}>Take all of theirs</Button>
+          <Button onClick={() => onSettle(new Set(conflicts.map((item) => item.id)))}>Keep all of mine</Button>
+          <Button tone="primary" onClick={() => onSettle(mine)}>Go on with this choice</Button>
+        </>
+      }
+    >
+      <p className="mb-4">Their save is revision {conflict.theirs.revision}. What only one of you changed is kept from both; choose for the rest. You can undo afterwards.</p>
+      <ul className="flex flex-col gap-4">
+        {conflicts.map((item) => (
+          <li key={item.id}>
+            <fieldset className="border border-line p-3">
+              <legend className="px-1 font-semibold">{titleOf(item, names)}</legend>
+              {([false, true] as const).map((isMine) => (
+                <label key={String(isMine)} className="flex min-h-9 items-center gap-2">
+                  <input type="radio" name={`conflict-${item.id}`} checked={mine.has(item.id) === isMine} onChange={() => choose(item.id, isMine)} className="size-5 accent-ink" />
+                  <span>{isMine ? "Mine" : "Theirs"}: {sayOf(item, isMine ? "mine" : "theirs", names)}</span>
+                </label>
+              ))}
+            </fieldset>
+          </li>
+        ))}
+      </ul>
+    </Dialog>
+  );
+}
+
+function titleOf(item: Conflict, names: Names): string {
+  if (item.kind === "lead") return `Lead ${(item.mine ?? item.theirs)?.number ?? ""}`;
+  const knob = item.mine ?? item.theirs;
+  return knob ? names.knob(knob.gearId, knob.knobId) : "A knob";
+}
+
+function sayOf(item: Conflict, side: "mine" | "theirs", names: Names): string {
+  return item.kind === "lead" ? describeLead(item[side], names) : describeKnob(item[side]);
+}

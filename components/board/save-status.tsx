@@ -1,0 +1,25 @@
+import { Button } from "../ui/button";
+import type { SaveState } from "./use-patch-editor";
+
+interface SaveStatusProps {
+  state: SaveState;
+  revision: number;
+  onRetry: () => void;
+}
+
+/** Whether the patch on screen is on the server. */
+export function SaveStatus({ state, revision, onRetry }: SaveStatusProps) {
+  if (state.status === "offline" || state.status === "refused") {
+    return (
+      <span role="alert" className="flex flex-wrap items-center gap-2 font-semibold text-verdict-hot">
+        Not saved: {state.detail}
+        <Button onClick={onRetry}>Try again</Button>
+      </span>
+    );
+  }
+  return (
+    <span role="status" data-save={state.status} className="text-ink-soft">
+      {state.status === "saved" ? (revision === 0 ? "Nothing to save yet" : `Saved · revision ${revision}`) : "Saving…"}
+    </span>
+  );
+}
