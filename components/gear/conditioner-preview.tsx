@@ -4,9 +4,10 @@ import { useEffect, useId, useState } from "react";
 import { useFormContext, useWatch } from "react-hook-form";
 import { Select } from "@/components/ui/inputs";
 import { Field } from "@/components/ui/field";
+import { startingGear } from "@/lib/core/electrics/starting-figures";
 import { simulateForPatch } from "@/lib/core/electrics/conditioner/simulate-for-patch";
 import type { ConditionerOutcome, ConditionerQuestion } from "@/lib/core/electrics/patch-types";
-import type { Gear } from "@/lib/schemas/gear";
+import { gearInputSchema, type Gear } from "@/lib/schemas/gear";
 import type { GearFormValues } from "./form-values";
 import { ASSUMED_RAILS, previewQuestion } from "./preview-question";
 import { PreviewOutcome } from "./preview-outcome";
@@ -15,6 +16,8 @@ import type { SupplyChoice } from "./supply-choices";
 const PAUSE_MS = 500;
 const TURNS = { "0": "fully anticlockwise", "0.25": "a quarter up", "0.5": "midway", "0.75": "three quarters up", "1": "fully clockwise" } as const;
 
+const FOAM = { id: "foam", name: "Any foam pad, assumed figures", details: gearInputSchema.parse(startingGear("pad", "foam", () => "foam")).details };
+
 /** What the circuit as typed does with one of the rig's pads, worked out again after every pause in the typing. */
 export function ConditionerPreview({ pads, supplies }: { pads: Gear[]; supplies: SupplyChoice[] }) {
   const { control } = useFormContext<GearFormValues>();
@@ -22,10 +25,10 @@ export function ConditionerPreview({ pads, supplies }: { pads: Gear[]; supplies:
   const supplyId = useWatch({ control, name: "supplyId" });
   const [padId, setPadId] = useState("");
   const [turn, setTurn] = useState<keyof typeof TURNS>("0.5");
-  const usable = pads.filter((pad) => pad.details.kind === "pad" && pad.details.sensor === "resistive");
-  const pad = usable.find((item) => item.id === padId) ?? usable[0];
+  const usable = [...pads.filter((pad) => pad.details.kind === "pad" && pad.details.sensor === "resistive"), FOAM];
+  const pad = usable.find((item) => item.id === padId) ?? usable[0] ?? FOAM;
   const supply = supplies.find((item) => item.id === supplyId);
-  const question = circuit && pad ? previewQuestion(circuit, supply ?? ASSUMED_RAILS, pad, Number(turn)) : null;
+  const question = circuit ? previewQuestion(circuit, supply ?? ASSUMED_RAILS, pad, Number(turn)) : null;
   const outcome = useOutcome(question);
   const headingId = useId();
 
@@ -33,23 +36,19 @@ export function ConditionerPreview({ pads, supplies }: { pads: Gear[]; supplies:
   return (
     <section aria-labelledby={headingId} className="flex flex-col gap-3 border-2 border-line-soft bg-bench p-4">
       <h3 id={headingId} className="text-lg font-bold">What comes out</h3>
-      {usable.length === 0 ? <p className="text-ink-soft">Add a resistive pad to the rig, and the pulse this circuit makes of it is shown here.</p> : (
-        <>
-          <div className="grid grid-cols-1 gap-x-6 gap-y-3 sm:grid-cols-2">
-            <Field id="gear-preview-pad" label="With this pad">
-              <Select id="gear-preview-pad" value={pad?.id} onChange={(event) => setPadId(event.target.value)}>
-                {usable.map((item) => <option key={item.id} value={item.id}>{item.name}</option>)}
-              </Select>
-            </Field>
-            <Field id="gear-preview-turn" label="Threshold pot">
-              <Select id="gear-preview-turn" value={turn} onChange={(event) => setTurn(event.target.value as keyof typeof TURNS)}>
-                {Object.entries(TURNS).map(([value, word]) => <option key={value} value={value}>{word}</option>)}
-              </Select>
-            </Field>
-          </div>
-          <PreviewOutcome outcome={question ? outcome : null} unreadable={question === null} onSupply={supply?.name ?? "a 9 V battery from 9.6 down to 6 V"} />
-        </>
-      )}
+      <div className="grid grid-cols-1 gap-x-6 gap-y-3 sm:grid-cols-2">
+        <Field id="gear-preview-pad" label="With this pad">
+          <Select id="gear-preview-pad" value={pad.id} onChange={(event) => setPadId(event.target.value)}>
+            {usable.map((item) => <option key={item.id} value={item.id}>{item.name}</option>)}
+          </Select>
+        </Field>
+        <Field id="gear-preview-turn" label="Threshold pot">
+          <Select id="gear-preview-turn" value={turn} onChange={(event) => setTurn(event.target.value as keyof typeof TURNS)}>
+            {Object.entries(TURNS).map(([value, word]) => <option key={value} value={value}>{word}</option>)}
+          </Select>
+        </Field>
+      </div>
+      <PreviewOutcome outcome={question ? outcome : null} unreadable={question === null} onSupply={supply?.name ?? "a 9 V battery from 9.6 down to 6 V"} />
     </section>
   );
 }

@@ -87,8 +87,7 @@ type FillIn = (variant: string, put: (circuit: CircuitValues) => void, only?: st
 
 function CircuitFields({ hasEnvelope, fillIn }: { hasEnvelope: boolean; fillIn: FillIn }) {
   const { control, getValues, setValue } = useFormContext<GearFormValues>();
-  const jacks = useWatch({ control, name: "jacks" });
-  const hasJack = jacks.some((jack) => jack.role === "envelope-out");
+  const hasJack = useWatch({ control, name: "jacks", compute: (jacks) => jacks.some((jack) => jack.role === "envelope-out") });
   const paths = (group: string, ...keys: string[]) => keys.map((key) => `${PARTS}.${group}.${key}`);
 
   const switchEnvelope = (on: boolean) => {

@@ -1,5 +1,6 @@
 "use client";
 
+import { memo } from "react";
 import { Checkbox } from "@/components/ui/inputs";
 import { useFormContext, useWatch } from "react-hook-form";
 import { CONNECTORS, type JackRole } from "@/lib/schemas/jack";
@@ -15,8 +16,8 @@ import { fieldId } from "./list-faults";
 const CONNECTOR_WORD = Object.fromEntries(CONNECTORS.map((name) => [name, name]));
 const DIRECTION_WORD = { output: "Output", input: "Input" };
 
-/** One jack: what it is called, which way it goes, what travels on it, and its figures. */
-export function JackFields({ index }: { index: number }) {
+/** One jack: what it is called, which way it goes, what travels on it, and its figures. Typing in one does not draw the others again. */
+export const JackFields = memo(function JackFields({ index }: { index: number }) {
   const { control, setValue } = useFormContext<GearFormValues>();
   const jack = useWatch({ control, name: `jacks.${index}` });
   const details = useWatch({ control, name: "details" });
@@ -77,7 +78,7 @@ export function JackFields({ index }: { index: number }) {
       <FoldedFigures paths={at(more)} />
     </div>
   );
-}
+});
 
 /** Only a conditioner's jacks need telling apart: its own outputs are computed. */
 function RoleField({ base, jack, kind }: { base: string; jack: JackValues; kind: string }) {

@@ -16,7 +16,7 @@ const MOST_JACKS = 24;
 export function JacksSection({ kind }: { kind: GearKind }) {
   const { control } = useFormContext<GearFormValues>();
   const { fields, append, remove } = useFieldArray({ control, name: "jacks", keyName: "fieldKey" });
-  const jacks = useWatch({ control, name: "jacks" });
+  const titles = useWatch({ control, name: "jacks", compute: (jacks) => jacks.map(({ name, direction }) => ({ name, direction })) });
   const announce = useAnnounce();
   const full = fields.length >= MOST_JACKS;
   const add = (direction: "input" | "output") => append(newJack(kind, direction, makeId()), { focusName: `jacks.${fields.length}.name` });
@@ -30,7 +30,7 @@ export function JacksSection({ kind }: { kind: GearKind }) {
     <FormSection title="Jacks" intro="Every socket a lead can go into, and what travels on it.">
       <ol className="flex flex-col gap-5">
         {fields.map((field, index) => {
-          const { name, direction } = jacks[index] ?? field;
+          const { name, direction } = titles[index] ?? field;
           const title = `Jack ${index + 1}${name ? `: ${name}` : ""}`;
           return (
             <li key={field.fieldKey}>

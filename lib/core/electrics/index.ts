@@ -6,3 +6,4 @@ export { dbuOfPeak, peakOfDbu } from "./judge/judge-audio";
 export { severityOf, worstVerdict } from "./judge/order-verdicts";
 export type * from "./patch-types";
 export { checkPatch, recheckPatch, type CheckPatchOptions } from "./check-patch";
+export { startingFigureSources, startingGear, startingSourcesOf, startingVariants, type StartingGear, type StartingKind, type StartingVariant } from "./starting-figures";

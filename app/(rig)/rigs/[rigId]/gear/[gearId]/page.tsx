@@ -1,3 +1,4 @@
+import type { Metadata } from "next";
 import { GearForm } from "@/components/gear/gear-form";
 import { GearView } from "@/components/gear/gear-view";
 import { toSupplyChoices } from "@/components/gear/supply-choices";
@@ -11,11 +12,16 @@ import { paths } from "@/lib/paths";
 import { rightToEditGear } from "@/lib/rights/can";
 import { orNotFound } from "@/lib/http/or-not-found";
 
-export const metadata = { title: "Gear" };
-
 interface GearPageProps {
   params: Promise<{ rigId: string; gearId: string }>;
   searchParams: Promise<{ edit?: string | string[]; saved?: string | string[] }>;
+}
+
+export async function generateMetadata({ params, searchParams }: GearPageProps): Promise<Metadata> {
+  const { rigId, gearId } = await params;
+  const { edit } = await searchParams;
+  const { name } = await orNotFound(loadGear(await requireActor(paths.gear(rigId, gearId)), rigId, gearId));
+  return { title: edit === "1" ? `Edit ${name}` : name };
 }
 
 export default async function GearPage({ params, searchParams }: GearPageProps) {
