@@ -26,6 +26,8 @@ export const paths = {
   people: (rigId: string) => `${rigPath(rigId)}/people`,
   api: {
     openapi: () => "/api/v1/openapi.json",
+    connection: () => "/api/v1/connection",
+    conditioner: () => "/api/v1/conditioner",
     accounts: () => "/api/v1/accounts",
     rigs: () => "/api/v1/rigs",
     rig: apiRig,

@@ -40,10 +40,14 @@ export function RunList({ check, leads, gearName, leadLabel, pickedLeadId, onPic
                     aria-current={pickedLeadId === id ? "true" : undefined}
                     className={`flex min-h-11 w-full flex-wrap items-center gap-x-3 gap-y-0.5 border-t border-line-soft px-1 py-1 text-left hover:bg-raised ${pickedLeadId === id ? "border-l-8 border-l-ink bg-raised" : ""}`}
                   >
-                    <span className="w-8 font-mono font-bold">{lead.number}</span>
-                    <span className="min-w-40 flex-1">{leadLabel(lead)}</span>
-                    {outcome?.highV ? <span className="font-mono text-sm">{formatRange(outcome.highV, "V")}</span> : null}
-                    {outcome ? <VerdictWord verdict={outcome.verdict} /> : null}
+                    <span className="w-8 font-mono text-lg font-bold">{lead.number}</span>
+                    <span className="flex min-w-0 flex-1 flex-wrap items-center justify-between gap-x-4">
+                      <span className="min-w-40">{leadLabel(lead)}</span>
+                      <span className="flex flex-wrap items-center gap-x-3">
+                        {outcome?.highV ? <span className="font-mono text-sm">{formatRange(outcome.highV, "V")}</span> : null}
+                        {outcome ? <VerdictWord verdict={outcome.verdict} /> : null}
+                      </span>
+                    </span>
                   </button>
                 </li>
               );
