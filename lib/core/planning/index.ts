@@ -1,0 +1,10 @@
+export type * from "./changeover/types";
+export { TYPICAL_PACE } from "./changeover/types";
+export { planChangeover, timeChangeover } from "./changeover/plan-changeover";
+export { applyStep, applySteps, startState, type HeldLead, type PatchState } from "./changeover/apply-step";
+export { planSet, type SongPatch } from "./changeover/plan-set";
+export { fitLead } from "./changeover/fit-lead";
+export { MOST_CONNECTIONS } from "./changeover/assign-leads";
+export type * from "./order/types";
+export { orderSet } from "./order/order-set";
+export { findOrderIssues, MOST_S, MOST_SONGS, type OrderIssue } from "./order/find-order-issues";
