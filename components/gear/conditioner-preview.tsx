@@ -14,7 +14,7 @@ import { PreviewOutcome } from "./preview-outcome";
 import type { SupplyChoice } from "./supply-choices";
 
 const PAUSE_MS = 500;
-const TURNS = { "0": "fully anticlockwise", "0.25": "a quarter up", "0.5": "midway", "0.75": "three quarters up", "1": "fully clockwise" } as const;
+const TURNS = [[0, "fully anticlockwise"], [0.25, "a quarter up"], [0.5, "midway"], [0.75, "three quarters up"], [1, "fully clockwise"]] as const;
 
 const FOAM = { id: "foam", name: "Any foam pad, assumed figures", details: gearInputSchema.parse(startingGear("pad", "foam", () => "foam")).details };
 
@@ -24,11 +24,11 @@ export function ConditionerPreview({ pads, supplies }: { pads: Gear[]; supplies:
   const circuit = useWatch({ control, name: "details.circuit" });
   const supplyId = useWatch({ control, name: "supplyId" });
   const [padId, setPadId] = useState("");
-  const [turn, setTurn] = useState<keyof typeof TURNS>("0.5");
+  const [turn, setTurn] = useState(0.5);
   const usable = [...pads.filter((pad) => pad.details.kind === "pad" && pad.details.sensor === "resistive"), FOAM];
   const pad = usable.find((item) => item.id === padId) ?? usable[0] ?? FOAM;
   const supply = supplies.find((item) => item.id === supplyId);
-  const question = circuit ? previewQuestion(circuit, supply ?? ASSUMED_RAILS, pad, Number(turn)) : null;
+  const question = circuit ? previewQuestion(circuit, supply ?? ASSUMED_RAILS, pad, turn) : null;
   const outcome = useOutcome(question);
   const headingId = useId();
 
@@ -43,8 +43,8 @@ export function ConditionerPreview({ pads, supplies }: { pads: Gear[]; supplies:
           </Select>
         </Field>
         <Field id="gear-preview-turn" label="Threshold pot">
-          <Select id="gear-preview-turn" value={turn} onChange={(event) => setTurn(event.target.value as keyof typeof TURNS)}>
-            {Object.entries(TURNS).map(([value, word]) => <option key={value} value={value}>{word}</option>)}
+          <Select id="gear-preview-turn" value={turn} onChange={(event) => setTurn(Number(event.target.value))}>
+            {TURNS.map(([value, word]) => <option key={value} value={value}>{word}</option>)}
           </Select>
         </Field>
       </div>
