@@ -1,6 +1,6 @@
 import { solveAssignment } from "../solve-assignment";
 import { fitLead } from "./fit-lead";
-import type { Adapter, ChangeoverRequest, StockLead } from "./types";
+import type { Adapter, ChangeoverRequest, Connection, StockLead } from "./types";
 
 /** Where one new connection's lead comes from. */
 export type Source =
@@ -42,7 +42,7 @@ export function assignLeads(request: ChangeoverRequest): Source[] {
   if (Math.max(from.length, to.length, spares.length) > MOST_CONNECTIONS) {
     throw new RangeError(`a changeover takes at most ${MOST_CONNECTIONS} connections and spare leads`);
   }
-  const hasStock = request.leads !== undefined;
+  if (request.leads === undefined) return assignAlike(from, to);
   const columns = from.length + spares.length + to.length;
   const cost = new Float64Array(to.length * columns).fill(NEVER);
   to.forEach((want, row) => {
@@ -50,17 +50,14 @@ export function assignLeads(request: ChangeoverRequest): Source[] {
     from.forEach((have, column) => {
       const adapters = fitLead(onRig[column], want, request);
       if (!adapters) return;
-      const inputMoved = have.input === want.input ? 0 : 1;
-      const ends = inputMoved + (have.output === want.output ? 0 : 1);
-      // Less the two ends of putting it away, which every lead on the rig costs unless it serves again.
-      cost[at + column] = (ends - 2) * END + adapters.length * ADAPTER + (ends > 0 ? TOUCHED : 0) + inputMoved * INPUT_MOVED;
+      cost[at + column] = moveCost(have, want) + adapters.length * ADAPTER;
     });
     const fetched = 2 * END + FETCH + TOUCHED + INPUT_MOVED;
     spares.forEach((lead, index) => {
       const adapters = fitLead(lead, want, request);
       if (adapters) cost[at + from.length + index] = fetched + adapters.length * ADAPTER;
     });
-    cost.fill(fetched + (hasStock ? SHORT : 0), at + from.length + spares.length, at + columns);
+    cost.fill(fetched + SHORT, at + from.length + spares.length, at + columns);
   });
   const columnOf = solveAssignment(to.length, columns, cost);
   return to.map((want, row): Source => {
@@ -68,6 +65,38 @@ export function assignLeads(request: ChangeoverRequest): Source[] {
     if (column < from.length) return { kind: "on-rig", fromRow: column, adapters: fitLead(onRig[column], want, request) ?? [] };
     const lead = spares[column - from.length];
     if (lead) return { kind: "stock", lead, adapters: fitLead(lead, want, request) ?? [] };
-    return { kind: "any", isShort: hasStock };
+    return { kind: "any", isShort: true };
   });
+}
+
+/**
+ * The same choice where every lead fits everywhere. A lead already in place may then be left there first: were it moved to x and its
+ * place filled from y, moving y to x instead touches no more leads, ends or inputs. What is left is usually a small table.
+ */
+function assignAlike(from: Connection[], to: Connection[]): Source[] {
+  const rowsAt = new Map<string, number[]>();
+  from.forEach((have, row) => rowsAt.set(keyOf(have), [...(rowsAt.get(keyOf(have)) ?? []), row]));
+  const stays = to.map((want) => rowsAt.get(keyOf(want))?.shift());
+  const free = [...rowsAt.values()].flat().sort((a, b) => a - b);
+  const open = to.flatMap((_, row) => (stays[row] === undefined ? [row] : []));
+  const columns = free.length + open.length;
+  const cost = new Float64Array(open.length * columns).fill(2 * END + FETCH + TOUCHED + INPUT_MOVED);
+  open.forEach((row, k) => free.forEach((fromRow, column) => (cost[k * columns + column] = moveCost(from[fromRow]!, to[row]!))));
+  const columnOf = solveAssignment(open.length, columns, cost);
+  const chosen = new Map(open.map((row, k) => [row, free[columnOf[k]!]]));
+  return to.map((_, row): Source => {
+    const fromRow = stays[row] ?? chosen.get(row);
+    return fromRow === undefined ? { kind: "any", isShort: false } : { kind: "on-rig", fromRow, adapters: [] };
+  });
+}
+
+/** What moving a lead costs, less the two ends of putting it away, which every lead on the rig costs unless it serves again. */
+function moveCost(have: Connection, want: Connection): number {
+  const inputMoved = have.input === want.input ? 0 : 1;
+  const ends = inputMoved + (have.output === want.output ? 0 : 1);
+  return (ends - 2) * END + (ends > 0 ? TOUCHED : 0) + inputMoved * INPUT_MOVED;
+}
+
+function keyOf({ output, input }: Connection): string {
+  return JSON.stringify([output, input]);
 }
