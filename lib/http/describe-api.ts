@@ -1,7 +1,10 @@
 import { z } from "zod";
 import { signUpSchema } from "@/lib/schemas/account";
+import { changeoverRequestSchema } from "@/lib/schemas/changeover";
+import { conditionerRequestSchema } from "@/lib/schemas/conditioner";
 import { connectionRequestSchema } from "@/lib/schemas/connection";
 import { gearInputSchema, gearReplaceSchema, gearRetireSchema } from "@/lib/schemas/gear";
+import { orderRequestSchema } from "@/lib/schemas/order";
 import { patchCheckSchema, patchSaveSchema } from "@/lib/schemas/patch";
 import { rigFieldsSchema } from "@/lib/schemas/rig";
 import { setCreateSchema, setOrderSchema } from "@/lib/schemas/set";
@@ -34,6 +37,9 @@ export const OPERATIONS: readonly Operation[] = [
   { method: "get", path: "/api/v1/health", summary: "Whether the server answers", right: "open", ok: 200 },
   { method: "get", path: "/api/v1/openapi.json", summary: "This document", right: "open", ok: 200 },
   { method: "post", path: "/api/v1/connection", summary: "One or more outputs into one or more inputs: volts and verdicts, worst case", right: "open", body: connectionRequestSchema, ok: 200, refusals: [413, 415, 429] },
+  { method: "post", path: "/api/v1/conditioner", summary: "A pad and its trigger conditioner: levels, pulses, envelope, findings", right: "open", body: conditionerRequestSchema, ok: 200, refusals: [413, 415, 429] },
+  { method: "post", path: "/api/v1/changeover", summary: "The fewest jacks to touch from one patch to another, step by step", right: "open", body: changeoverRequestSchema, ok: 200, refusals: [413, 415, 429] },
+  { method: "post", path: "/api/v1/order", summary: "The order of songs with the least total changeover", right: "open", body: orderRequestSchema, ok: 200, refusals: [413, 415, 422, 429] },
   { method: "post", path: "/api/v1/accounts", summary: "Make an account", right: "open", body: signUpSchema, ok: 201, refusals: [409] },
   { method: "get", path: "/api/v1/rigs", summary: "The rigs you are in", right: "account", ok: 200 },
   { method: "post", path: "/api/v1/rigs", summary: "Make a rig of your own", right: "account", body: rigFieldsSchema, ok: 201 },

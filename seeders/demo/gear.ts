@@ -64,7 +64,7 @@ export const demoVoices: SeedGear[] = [
   box("voice-low", "voice", "Low drum", "Bridged-T oscillator, rings when pinged.", "rail-12", [trigIn("voice-low"), audioOut("voice-low", "2.5–3.5")], ["Pitch", "Decay"]),
   box("voice-snare", "voice", "Snare", "Noise and a ringing filter.", "rail-12", [trigIn("voice-snare", { pulseMinS: "1m" }), audioOut("voice-snare", "2–3")], ["Snap", "Decay"]),
   box("voice-tin", "voice", "Tin plate", "A bare 5 V logic input behind the jack: 5.5 V is all it stands.", "rail-5", [
-    input("voice-tin-trig", "Trig", { accepts: ["trigger", "gate"], onV: "1.5–3.5", offV: "1–1.5", safeLowV: "-0.5", safeHighV: "5.5", loadOhm: "100k" }),
+    input("voice-tin-trig", "Trig", { accepts: ["trigger", "gate"], onV: "0.8–2", offV: "0.8–2", safeLowV: "-0.5", safeHighV: "5.5", loadOhm: "100k" }),
     audioOut("voice-tin", "1–1.5"),
   ], ["Ring"]),
   box("voice-hiss", "voice", "Hiss", "Wants a shape, not a pulse: the envelope opens the noise.", "rail-12", [
@@ -72,7 +72,7 @@ export const demoVoices: SeedGear[] = [
     audioOut("voice-hiss", "1.5–2"),
   ], ["Colour"]),
   box("voice-clap", "voice", "Clap", "Fires when its input is pulled to 0 V.", "rail-5", [
-    input("voice-clap-trig", "Pull", { accepts: ["trigger", "gate"], polarity: "falling", onV: "0.8–2", offV: "2–3", safeLowV: "-0.5", safeHighV: "5.5", loadOhm: "10k", biasV: "5" }),
+    input("voice-clap-trig", "Pull", { accepts: ["trigger", "gate"], polarity: "falling", onV: "0.8–2", offV: "2–3", safeLowV: "-0.5", safeHighV: "12", loadOhm: "10k", biasV: "5" }),
     audioOut("voice-clap", "1.5–2"),
   ], ["Spread"]),
   box("voice-tom-l", "voice", "Low tom", "", "rail-12", [trigIn("voice-tom-l"), audioOut("voice-tom-l", "2–3")], ["Pitch", "Bend"]),

@@ -12,7 +12,7 @@ import { paths } from "@/lib/paths";
 const FIELDS = [
   { key: "activeV", label: "Trigger when struck", unit: "V", start: "4.5–8.1", at: "outputs.0.activeV" },
   { key: "sourceOhm", label: "In series with it", unit: "Ω", start: "1k", at: "outputs.0.sourceOhm" },
-  { key: "onV", label: "Input fires within", unit: "V", start: "1.5–3.5", at: "inputs.0.onV" },
+  { key: "onV", label: "Input fires within", unit: "V", start: "0.8–2", at: "inputs.0.onV" },
   { key: "safeMax", label: "Input stands up to", unit: "V", start: "5.5", at: "inputs.0.safeV.max" },
   { key: "loadOhm", label: "Input’s own load", unit: "Ω", start: "100k", at: "inputs.0.loadOhm" },
 ] as const;
@@ -24,7 +24,7 @@ export function LiveExample() {
   const [figures, setFigures] = useState(Object.fromEntries(FIELDS.map((field) => [field.key, field.start])) as Record<Key, string>);
   const body = useMemo(() => JSON.stringify({
     outputs: [{ signal: "trigger", restV: 0, activeV: figures.activeV, sourceOhm: figures.sourceOhm }],
-    inputs: [{ id: "input", accepts: ["trigger", "gate"], onV: figures.onV, offV: "1", safeV: { min: -0.5, max: figures.safeMax }, loadOhm: figures.loadOhm }],
+    inputs: [{ id: "input", accepts: ["trigger", "gate"], onV: figures.onV, offV: "0.8", safeV: { min: -0.5, max: figures.safeMax }, loadOhm: figures.loadOhm }],
   }), [figures]);
   const { data, error } = useSWR<ConnectionCheck, unknown>([paths.api.connection(), body], () => fetchJson(paths.api.connection(), { body: JSON.parse(body) as unknown }), { keepPreviousData: true, revalidateOnFocus: false, shouldRetryOnError: false });
   const faults = error instanceof ProblemError ? (error.problem.errors ?? []) : [];

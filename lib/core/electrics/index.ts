@@ -7,3 +7,6 @@ export { severityOf, worstVerdict } from "./judge/order-verdicts";
 export type * from "./patch-types";
 export { checkPatch, recheckPatch, type CheckPatchOptions } from "./check-patch";
 export { startingFigureSources, startingGear, startingSourcesOf, startingVariants, type StartingGear, type StartingKind, type StartingVariant } from "./starting-figures";
+export { simulateConditioner } from "./circuit/simulate-conditioner";
+export { simulateForPatch } from "./circuit/simulate-for-patch";
+export type { ConditionerResult, ConditionerSpec, Finding, Trace } from "./circuit/conditioner-types";
