@@ -34,6 +34,9 @@ function tameLevel(connection: Connection, place: number, listener: ListenerChec
   const extreme: Range = { min: Math.min(highV.min, lowV.min), max: Math.max(highV.max, lowV.max) };
   const resistor = findSeriesResistor(connection, place, options);
   if (resistor) return [resistor];
+  // A diode would cut half of a sound away.
+  const isAudio = connection.outputs.some((output) => output.signal === "audio");
+  if (isAudio) return [findDivider(connection, place, extreme, options)];
   const diode = findSeriesDiode(connection, place);
   const divider = findDivider(connection, place, extreme, options);
   if (diode || divider) return [divider, diode];

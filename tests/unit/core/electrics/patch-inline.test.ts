@@ -39,3 +39,17 @@ describe("parts in a lead", () => {
     expect(both.b?.highV?.max).toBeLessThan(8.1);
   });
 });
+
+describe("audio that is too hot for a channel", () => {
+  it("is never mended with a diode", () => {
+    const audio: RigModel = {
+      gear: [
+        { id: "v", kind: "voice", name: "Voice", assumed: [], jacks: [{ id: "out", name: "Out", direction: "output", role: "through", output: { signal: "audio", restV: 0, activeV: { min: 1.5, max: 2 }, sourceOhm: 1000 } }] },
+        { id: "d", kind: "desk-channel", name: "Mic", assumed: [], jacks: [{ id: "mic", name: "Mic", direction: "input", role: "plain", input: { accepts: ["audio"], safeV: { min: -15, max: 15 }, loadOhm: 10_000, maxDbu: -10 } }] },
+      ],
+    };
+    const lead = checkPatch(audio, { leads: [{ id: "a", number: 1, outputId: "out", inputId: "mic" }], knobs: [] }).leads.a;
+    expect(lead?.verdict).toBe("hot");
+    expect(lead?.fixes.map((fix) => fix.kind)).not.toContain("series-diode");
+  });
+});
