@@ -1,6 +1,7 @@
 import { requireApiActor } from "@/lib/auth/require-actor";
 import { loadRig } from "@/lib/data/load-rig";
 import { renameRig } from "@/lib/data/rename-rig";
+import { requireRight } from "@/lib/data/require-right";
 import { handle, json } from "@/lib/http/handle";
 import { readJson } from "@/lib/http/read-json";
 import { rigFieldsSchema } from "@/lib/schemas/rig";
@@ -11,7 +12,7 @@ export const GET = handle<Params>(async (_request, { rigId }) => json(await load
 
 export const PATCH = handle<Params>(async (request, { rigId }) => {
   const actor = await requireApiActor();
-  await loadRig(actor, rigId);
+  await requireRight(actor, rigId, "manageRig");
   const { name } = await readJson(request, rigFieldsSchema);
   return json({ rig: await renameRig(actor, rigId, name) });
 });
