@@ -47,7 +47,7 @@ export const BoardCard = memo(function BoardCard({ gear, box, jacks, plugged, kn
         aria-disabled={undefined}
         onClick={() => onPick(gear.id)}
         style={{ height: tapeHeight }}
-        className="tape block w-full touch-none truncate px-2 text-left text-[1.35em] leading-none"
+        className="tape block w-full touch-none truncate px-2 text-left text-[1.3em] leading-none"
         title={gear.retired ? `${gear.name} (retired)` : gear.name}
       >
         {gear.name}{gear.retired ? " (retired)" : ""}

@@ -23,6 +23,9 @@ export interface Stack {
   height: number;
 }
 
+/** Folded cards may stand close: there is nothing between them to tell apart. */
+const FOLDED_GAP = 1;
+
 /** Stacks each lane's cards from the top on the grid of jack rows. */
 export function stackCards(cards: readonly ChartCard[], metrics: ChartMetrics): Stack {
   const nextTop = [0, 0, 0, 0];
@@ -34,7 +37,7 @@ export function stackCards(cards: readonly ChartCard[], metrics: ChartMetrics): 
     const cardHeight = heightOf(card, metrics);
     stacked.push({ id: card.id, lane: card.lane, top, height: cardHeight });
     height = Math.max(height, top + cardHeight);
-    nextTop[card.lane] = top + Math.ceil((cardHeight + metrics.cardGap) / metrics.jackPitch - 1e-9) * metrics.jackPitch;
+    nextTop[card.lane] = top + Math.ceil((cardHeight + (card.folded ? FOLDED_GAP : metrics.cardGap)) / metrics.jackPitch - 1e-9) * metrics.jackPitch;
     if (card.folded) continue;
     const rows = { in: 0, out: 0 };
     for (const { id, side } of card.jacks) {

@@ -20,8 +20,8 @@ export default async function RigLayout({ children, params }: Props) {
   return (
     <>
       <div data-print="hide" className="flex flex-wrap items-center gap-x-6 gap-y-1 border-b border-line bg-bench px-4 py-1 md:px-6">
-        <Tape size="small" className="max-w-[60vw] truncate">{rig.name}</Tape>
-        <nav aria-label="Rig" className="flex flex-wrap gap-x-1">
+        <nav aria-label="Rig" className="flex flex-wrap items-center gap-x-1">
+          <Tape size="small" className="mr-4 max-w-[60vw] truncate">{rig.name}</Tape>
           <NavLink href={paths.rig(rigId)} exact>Overview</NavLink>
           <NavLink href={paths.gearList(rigId)}>Gear</NavLink>
           <NavLink href={paths.songs(rigId)}>Songs</NavLink>

@@ -1,0 +1,151 @@
+import { expect, test } from "@playwright/test";
+import { drag, newSong, RIG, saved, signIn } from "./people";
+
+const tag = (number: number) => new RegExp(`^Lead ${number}, .* to `);
+
+test.describe("the board", () => {
+  test.beforeEach(async ({ page }) => signIn(page, "performer"));
+
+  test("plugs by tapping one jack, then the other, and unplugs with Delete; undo brings it back", async ({ page }) => {
+    const song = await newSong(page.request, "Tapped");
+    await page.goto(`${RIG}/songs/${song}`);
+    await page.locator("[data-jack=pad-snare-out]").click();
+    await expect(page.getByText("now tap the other end")).toBeVisible();
+    // Every free jack says beforehand what it would be.
+    await expect(page.locator("[data-jack=cond-snare-pad]")).toContainText("good");
+    await page.locator("[data-jack=cond-snare-pad]").click();
+    const lead = page.getByRole("button", { name: tag(1) });
+    await expect(lead).toContainText("good");
+    await saved(page);
+    await lead.focus();
+    await page.keyboard.press("Delete");
+    await expect(lead).toHaveCount(0);
+    await page.keyboard.press("Control+z");
+    await expect(lead).toBeVisible();
+    await saved(page);
+  });
+
+  test("a lead dragged off its input is unplugged, and dragged to another input is moved", async ({ page }) => {
+    const song = await newSong(page.request, "Dragged", "wet-chalk");
+    await page.goto(`${RIG}/songs/${song}`);
+    await page.getByRole("button", { name: "Low tom, Trig" }).first().waitFor().catch(() => undefined);
+    await page.getByLabel("Fold unpatched cards").uncheck();
+    await drag(page, '[data-lead-tag="wet-chalk-2"]', "[data-jack=voice-wood-trig]");
+    await expect(page.getByRole("button", { name: /^Lead 2, Kick trigger · Trig out to Wood · Trig/ })).toBeVisible();
+    await drag(page, '[data-lead-tag="wet-chalk-2"]', "h1");
+    await expect(page.getByRole("button", { name: tag(2) })).toHaveCount(0);
+    await saved(page);
+  });
+
+  test("a card moves within its lane by pointer and by keyboard", async ({ page }) => {
+    const song = await newSong(page.request, "Moved");
+    await page.goto(`${RIG}/songs/${song}`);
+    const order = () => page.getByRole("group", { name: "Pads" }).locator("[data-card]").evaluateAll((cards) => cards.sort((a, b) => a.getBoundingClientRect().top - b.getBoundingClientRect().top).map((card) => card.getAttribute("data-card")));
+    expect((await order()).slice(0, 2)).toEqual(["pad-kick", "pad-snare"]);
+    await drag(page, "[data-card=pad-kick] > button", "[data-card=pad-snare] > button");
+    await expect.poll(async () => (await order()).slice(0, 2)).toEqual(["pad-snare", "pad-kick"]);
+    await saved(page);
+    await page.locator("[data-card=pad-snare] > button").focus();
+    await page.keyboard.press("Space");
+    await page.waitForTimeout(200);
+    await page.keyboard.press("ArrowDown");
+    await page.waitForTimeout(300);
+    await page.keyboard.press("Space");
+    await expect.poll(async () => (await order()).slice(0, 2)).toEqual(["pad-kick", "pad-snare"]);
+  });
+
+  test("a knob is set as a clock position and left alone again", async ({ page }) => {
+    const song = await newSong(page.request, "Turned");
+    await page.goto(`${RIG}/songs/${song}`);
+    await page.getByRole("button", { name: /^Knobs of Low drum/ }).click();
+    const dialog = page.getByRole("dialog");
+    await dialog.getByRole("button", { name: "Set it" }).first().click();
+    await dialog.getByRole("slider").first().press("ArrowRight");
+    await expect(dialog).toContainText("half past 12");
+    await dialog.getByRole("button", { name: "Done" }).click();
+    await expect(page.getByRole("button", { name: /^Knobs of Low drum: Pitch at half past 12/ })).toBeVisible();
+    await saved(page);
+  });
+
+  test("the list of runs is one key away", async ({ page }) => {
+    await page.goto(`${RIG}/songs/wet-chalk`);
+    await page.locator("h1").click();
+    await page.keyboard.press("r");
+    await expect(page.getByRole("heading", { name: /Kick slab → Kick trigger → Low drum → Ch 1/ })).toBeVisible();
+  });
+
+  test("closing the tab mid-edit loses nothing older than a second", async ({ page, context }) => {
+    const song = await newSong(page.request, "Closed");
+    await page.goto(`${RIG}/songs/${song}`);
+    await page.locator("[data-jack=pad-kick-out]").click();
+    await page.locator("[data-jack=cond-kick-pad]").click();
+    await expect(page.getByRole("button", { name: tag(1) })).toBeVisible();
+    await page.close({ runBeforeUnload: true });
+    const again = await context.newPage();
+    await again.goto(`${RIG}/songs/${song}`);
+    await expect(again.getByRole("button", { name: tag(1) })).toBeVisible();
+    await saved(again);
+  });
+
+  test("a save that the server does not answer is kept and sent again", async ({ page }) => {
+    const song = await newSong(page.request, "Offline");
+    await page.goto(`${RIG}/songs/${song}`);
+    await page.route("**/patch", (route) => (route.request().method() === "PUT" ? route.abort() : route.continue()));
+    await page.locator("[data-jack=pad-kick-out]").click();
+    await page.locator("[data-jack=cond-kick-pad]").click();
+    await expect(page.getByText("Not saved:")).toBeVisible();
+    await page.unroute("**/patch");
+    await saved(page);
+  });
+});
+
+test("two people on one song keep both their leads, and are asked about one knob", async ({ browser }) => {
+  const [one, two] = [await (await browser.newContext()).newPage(), await (await browser.newContext()).newPage()];
+  await signIn(one, "performer");
+  await signIn(two, "collaborator");
+  const song = await newSong(one.request, "Shared");
+  await Promise.all([one.goto(`${RIG}/songs/${song}`), two.goto(`${RIG}/songs/${song}`)]);
+  const plug = async (page: typeof one, from: string, to: string) => {
+    await page.locator(`[data-jack=${from}]`).click();
+    await page.locator(`[data-jack=${to}]`).click();
+  };
+  await plug(one, "pad-kick-out", "cond-kick-pad");
+  await saved(one);
+  await plug(two, "pad-snare-out", "cond-snare-pad");
+  await expect(two.getByText("Both their changes and yours are here")).toBeVisible();
+  await saved(two);
+  await expect(two.getByRole("button", { name: /to Kick trigger · Pad in/ })).toBeVisible();
+  await expect(two.getByRole("button", { name: /to Snare trigger · Pad in/ })).toBeVisible();
+
+  await one.reload();
+  const turn = async (page: typeof one, key: string) => {
+    await page.getByRole("button", { name: /^Knobs of Low drum/ }).click();
+    await page.getByRole("dialog").getByRole("button", { name: "Set it" }).first().click();
+    await page.getByRole("dialog").getByRole("slider").first().press(key);
+    await page.getByRole("dialog").getByRole("button", { name: "Done" }).click();
+  };
+  await turn(one, "Home");
+  await saved(one);
+  await turn(two, "End");
+  const asked = two.getByRole("dialog", { name: "Somebody else changed the same thing" });
+  await expect(asked).toContainText("Low drum · Pitch");
+  await asked.getByRole("button", { name: "Keep all of mine" }).click();
+  await saved(two);
+  const stored = (await (await two.request.get(`/api/v1${RIG}/songs/${song}/patch`)).json()) as { patch: { knobs: { position: number }[]; leads: unknown[] } };
+  expect(stored.patch.knobs[0]?.position).toBe(1);
+  expect(stored.patch.leads).toHaveLength(2);
+});
+
+test("a set list is ordered by dragging, by keys and by buttons", async ({ page }) => {
+  await signIn(page, "performer");
+  await page.goto(`${RIG}/sets/pump-house`);
+  const titles = () => page.locator("[data-set-song]").evaluateAll((rows) => rows.map((row) => row.getAttribute("data-set-song")));
+  const [first, second] = await titles();
+  await drag(page, `[data-set-song="${first}"] .tape`, `[data-set-song="${second}"] .tape`);
+  await expect.poll(async () => (await titles()).slice(0, 2)).toEqual([second, first]);
+  await page.getByRole("button", { name: `Move ${first} up` }).click();
+  await expect.poll(async () => (await titles()).slice(0, 2)).toEqual([first, second]);
+  await expect(page.getByText(/Saved · revision/)).toBeVisible();
+  await page.reload();
+  expect((await titles()).slice(0, 2)).toEqual([first, second]);
+});
