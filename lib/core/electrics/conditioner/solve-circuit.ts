@@ -1,0 +1,40 @@
+import { buildTrace } from "./build-trace";
+import type { Circuit, Solution } from "./conditioner-types";
+import { solveOutput } from "./solve-output";
+import { solveShaper } from "./solve-shaper";
+import { wantedLevels } from "./wanted-levels";
+
+/**
+ * Solves one conditioner for one strike, as a circuit: the coupling network loads the divider, the clamp and envelope
+ * diodes and the follower are devices, the comparator has one current limit for its whole load.
+ * @param withTrace also the signals over time.
+ */
+export function solveCircuit(circuit: Circuit, withTrace = false): Solution {
+  // At rest the comparator sees 0 V; a threshold at or below that is no threshold.
+  const restsHigh = circuit.tripV <= 0;
+  const shaped = solveShaper(circuit, restsHigh, withTrace);
+  const flips = restsHigh ? [] : shaped.flips;
+  const last = flips.at(-1);
+  const stretches = wantedLevels(circuit, restsHigh, flips, shaped.startS, shaped.endS);
+  const output = solveOutput(circuit, restsHigh, stretches, last && !last.high ? last.timeS : null, withTrace);
+  const fires = !restsHigh && output.pulses.length > 0;
+  // A pad that falls when it is struck (lower leg, or a resistance that rises) has its extreme below.
+  const isUp = (circuit.leg === "upper") === circuit.hitOhm <= circuit.restOhm;
+  return {
+    fires,
+    restsHigh,
+    padRestV: shaped.padRestV,
+    padHitV: isUp ? shaped.padMostV : shaped.padLeastV,
+    shapedPeakV: shaped.peakV,
+    shapedLeastV: shaped.leastV,
+    thresholdV: circuit.thresholdV,
+    latches: last?.high === true,
+    pulses: restsHigh ? [] : output.pulses,
+    restV: output.restV,
+    activeV: fires ? output.highestV : output.settledV,
+    sourceOhm: 1 / (1 / circuit.seriesOhm + 1 / circuit.shuntOhm),
+    envelope: output.envelope,
+    tripped: flips.length > 0,
+    trace: withTrace ? buildTrace(circuit, shaped, stretches, output) : null,
+  };
+}
