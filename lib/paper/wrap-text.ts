@@ -1,0 +1,104 @@
+import { measure, type TextStyle } from "./fonts";
+
+/** A stretch of text in one style and size. */
+export interface Span {
+  style: TextStyle;
+  size: number;
+  text: string;
+}
+
+/** One line of spans, set one after the other. */
+export interface Line {
+  spans: Span[];
+  width: number;
+  size: number;
+}
+
+const ELLIPSIS = "…";
+
+/** Breaks spans into lines no wider than `width`, at spaces where it can and inside a word where it must. */
+export function wrapSpans(spans: readonly Span[], width: number): Line[] {
+  const lines: Line[] = [];
+  let line: Line = { spans: [], width: 0, size: 0 };
+  const push = (span: Span, wide: number) => {
+    const last = line.spans.at(-1);
+    if (last && last.style === span.style && last.size === span.size) last.text += span.text;
+    else line.spans.push({ ...span });
+    line.width += wide;
+    line.size = Math.max(line.size, span.size);
+  };
+  const close = () => {
+    if (line.spans.length > 0) lines.push(line);
+    line = { spans: [], width: 0, size: 0 };
+  };
+  for (const { style, size, text } of spans) {
+    for (const word of text.split(/\s+/u).filter((part) => part !== "")) {
+      for (const piece of breakWord({ style, size, text: word }, width)) {
+        const wide = measure(style, size, piece);
+        const gap = line.spans.length === 0 ? 0 : measure(style, size, " ");
+        if (line.spans.length > 0 && line.width + gap + wide > width + 1e-6) close();
+        else if (gap > 0) push({ style, size, text: " " }, gap);
+        push({ style, size, text: piece }, wide);
+      }
+    }
+  }
+  close();
+  return lines;
+}
+
+export function wrapText(style: TextStyle, size: number, text: string, width: number): Line[] {
+  return wrapSpans([{ style, size, text }], width);
+}
+
+function breakWord({ style, size, text }: Span, width: number): string[] {
+  if (measure(style, size, text) <= width) return [text];
+  const pieces: string[] = [];
+  let piece = "";
+  for (const letter of text) {
+    if (piece !== "" && measure(style, size, piece + letter) > width) {
+      pieces.push(piece);
+      piece = "";
+    }
+    piece += letter;
+  }
+  return piece === "" ? pieces : [...pieces, piece];
+}
+
+interface Fit {
+  width: number;
+  maxSize: number;
+  minSize: number;
+  maxLines: number;
+  /** True: what still does not fit ends in an ellipsis; false: it takes as many lines as it needs. */
+  clips: boolean;
+}
+
+/** The largest size, in steps of a point, at which the text stands in so many lines with its words whole; else at the least size. */
+export function fitText(style: TextStyle, text: string, { width, maxSize, minSize, maxLines, clips }: Fit): { lines: Line[]; size: number } {
+  const words = text.split(/\s+/u);
+  for (let size = maxSize; size >= minSize; size -= 1) {
+    const lines = wrapText(style, size, text, width);
+    if (lines.length <= maxLines && words.every((word) => measure(style, size, word) <= width)) return { lines, size };
+  }
+  const lines = wrapText(style, minSize, text, width);
+  if (!clips || lines.length <= maxLines) return { lines, size: minSize };
+  const kept = lines.slice(0, maxLines - 1);
+  const rest = lines.slice(maxLines - 1).flatMap((line) => line.spans.map((span) => span.text)).join(" ");
+  return { lines: [...kept, clipText(style, minSize, rest, width)], size: minSize };
+}
+
+/** One line, cut at the end with an ellipsis where it is too long. */
+export function clipText(style: TextStyle, size: number, text: string, width: number): Line {
+  let shown = text;
+  if (measure(style, size, text) > width) {
+    const letters = [...text];
+    let [low, high] = [0, letters.length];
+    while (low < high) {
+      const middle = Math.ceil((low + high) / 2);
+      if (measure(style, size, letters.slice(0, middle).join("").trimEnd() + ELLIPSIS) <= width) low = middle;
+      else high = middle - 1;
+    }
+    shown = letters.slice(0, low).join("").trimEnd() + ELLIPSIS;
+  }
+  return { spans: [{ style, size, text: shown }], width: measure(style, size, shown), size };
+}
