@@ -75,11 +75,17 @@ export function assignLeads(request: ChangeoverRequest): Source[] {
  */
 function assignAlike(from: Connection[], to: Connection[]): Source[] {
   const rowsAt = new Map<string, number[]>();
-  from.forEach((have, row) => rowsAt.set(keyOf(have), [...(rowsAt.get(keyOf(have)) ?? []), row]));
+  from.forEach((have, row) => {
+    const key = keyOf(have);
+    const rows = rowsAt.get(key);
+    if (rows) rows.push(row);
+    else rowsAt.set(key, [row]);
+  });
   const stays = to.map((want) => rowsAt.get(keyOf(want))?.shift());
   const free = [...rowsAt.values()].flat().sort((a, b) => a - b);
   const open = to.flatMap((_, row) => (stays[row] === undefined ? [row] : []));
-  const columns = free.length + open.length;
+  // Serving with a lead at hand always beats putting it away and fetching another, so only the surplus is fetched.
+  const columns = Math.max(free.length, open.length);
   const cost = new Float64Array(open.length * columns).fill(2 * END + FETCH + TOUCHED + INPUT_MOVED);
   open.forEach((row, k) => free.forEach((fromRow, column) => (cost[k * columns + column] = moveCost(from[fromRow]!, to[row]!))));
   const columnOf = solveAssignment(open.length, columns, cost);
@@ -98,5 +104,5 @@ function moveCost(have: Connection, want: Connection): number {
 }
 
 function keyOf({ output, input }: Connection): string {
-  return JSON.stringify([output, input]);
+  return `${output.length}:${output}${input}`;
 }

@@ -36,8 +36,8 @@ function findCarried(from: PluggedLead[], plan: Changeover, to: Connection[]): P
   const byPair = new Map<string, PluggedLead[]>();
   for (const { lead, output, input } of after.leads) {
     if (output === null || input === null) continue;
-    const key = JSON.stringify([output, input]);
+    const key = `${output.length}:${output}${input}`;
     byPair.set(key, [...(byPair.get(key) ?? []), { output, input, ...(lead === null ? {} : { lead }) }]);
   }
-  return to.flatMap(({ output, input }) => byPair.get(JSON.stringify([output, input]))?.shift() ?? []);
+  return to.flatMap(({ output, input }) => byPair.get(`${output.length}:${output}${input}`)?.shift() ?? []);
 }
