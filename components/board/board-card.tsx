@@ -36,7 +36,7 @@ export const BoardCard = memo(function BoardCard({ gear, box, jacks, plugged, kn
       ref={sortable.setNodeRef}
       data-card={gear.id}
       style={{ left: box.x, top: box.y, width: box.width, height: box.height, transform: CSS.Translate.toString(sortable.transform), transition: sortable.transition }}
-      className={clsx("absolute bg-bench", !isPicked && "border-b-2 border-line-soft", isPicked && "outline-3 outline-mark", isDim && "opacity-35", sortable.isDragging && "opacity-40")}
+      className={clsx("absolute bg-bench", !isPicked && "border-b-2 border-line-soft", isPicked && "outline-3 outline-mark", isDim && "opacity-65", sortable.isDragging && "opacity-40")}
     >
       <button
         type="button"
@@ -62,10 +62,10 @@ export const BoardCard = memo(function BoardCard({ gear, box, jacks, plugged, kn
           onClick={() => onKnobs(gear.id)}
           style={{ height: footHeight }}
           aria-label={`Knobs of ${gear.name}: ${knobs.length === 0 ? "none set in this song" : knobs.map((knob) => `${nameOf(gear, knob.knobId)} at ${clockText(knob.position)}`).join(", ")}`}
-          className="absolute bottom-0 flex w-full items-center gap-2 overflow-hidden border-t border-line-soft px-1.5 text-[0.8em] text-ink-soft hover:text-ink"
+          className="absolute bottom-0 flex w-full items-center gap-2 overflow-hidden border-t border-line-soft px-1.5 text-[0.8em] text-ink hover:underline"
         >
           {knobs.length === 0 ? <span>{canEdit ? "Set a knob" : "No knob set"}</span> : knobs.map((knob) => (
-            <span key={knob.knobId} className="flex items-center gap-1 whitespace-nowrap text-ink" aria-hidden="true">
+            <span key={knob.knobId} className="flex items-center gap-1 whitespace-nowrap" aria-hidden="true">
               <ClockDial position={knob.position} size={Math.round(footHeight * 0.68)} />
               {nameOf(gear, knob.knobId)}
             </span>

@@ -29,7 +29,7 @@ export function KnobDialog({ gear, knobs, canEdit, edit, onClose }: KnobDialogPr
           return (
             <li key={knob.id} className="flex flex-wrap items-center gap-3">
               <ClockDial position={set?.position ?? MIDDLE} size={40} className={set ? "" : "opacity-30"} />
-              <label htmlFor={sliderId} className="min-w-24 font-semibold">{knob.name}</label>
+              {set ? <label htmlFor={sliderId} className="min-w-24 font-semibold">{knob.name}</label> : <span className="min-w-24 font-semibold">{knob.name}</span>}
               {set ? (
                 <>
                   <input
@@ -42,7 +42,7 @@ export function KnobDialog({ gear, knobs, canEdit, edit, onClose }: KnobDialogPr
               ) : (
                 <>
                   <span className="flex-1 text-ink-soft">left alone in this song</span>
-                  {canEdit ? <Button id={sliderId} onClick={() => turn(MIDDLE)}>Set it</Button> : null}
+                  {canEdit ? <Button aria-label={`Set ${knob.name}`} onClick={() => turn(MIDDLE)}>Set it</Button> : null}
                 </>
               )}
             </li>

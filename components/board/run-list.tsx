@@ -24,7 +24,7 @@ export function RunList({ check, leads, gearName, leadLabel, pickedLeadId, onPic
       {runs.map((run) => (
         <li key={run.leadIds.join()} className="bg-bench p-3">
           <div className="mb-2 flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
-            <h3 className="font-tape text-xl font-bold leading-tight">{run.gearIds.map(gearName).join(" → ")}{run.complete ? "" : " …"}</h3>
+            <h2 className="font-tape text-xl font-bold leading-tight">{run.gearIds.map(gearName).join(" → ")}{run.complete ? "" : " …"}</h2>
             <VerdictWord verdict={run.verdict} />
           </div>
           <ul className="flex flex-col">

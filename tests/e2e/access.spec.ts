@@ -14,6 +14,7 @@ for (const scheme of ["light", "dark"] as const) {
       const look = async (path: string) => {
         await page.goto(path);
         await page.waitForLoadState("load");
+        await page.locator("h1").first().waitFor();
         const result = await new AxeBuilder({ page }).exclude("object, iframe").analyze();
         expect(result.violations.map((violation) => `${path}: ${violation.id} ${violation.nodes[0]?.target.join(" ")} ${violation.nodes[0]?.failureSummary ?? ""}`)).toEqual([]);
         expect(await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth), path).toBeLessThanOrEqual(0);

@@ -28,10 +28,9 @@ test.describe("the board", () => {
   test("a lead dragged off its input is unplugged, and dragged to another input is moved", async ({ page }) => {
     const song = await newSong(page.request, "Dragged", "wet-chalk");
     await page.goto(`${RIG}/songs/${song}`);
-    await page.getByRole("button", { name: "Low tom, Trig" }).first().waitFor().catch(() => undefined);
     await page.getByLabel("Fold unpatched cards").uncheck();
-    await drag(page, '[data-lead-tag="wet-chalk-2"]', "[data-jack=voice-wood-trig]");
-    await expect(page.getByRole("button", { name: /^Lead 2, Kick trigger · Trig out to Wood · Trig/ })).toBeVisible();
+    await drag(page, '[data-lead-tag="wet-chalk-2"]', "[data-jack=voice-snare-trig]");
+    await expect(page.getByRole("button", { name: /^Lead 2, Kick trigger · Trig out to Snare · Trig/ })).toBeVisible();
     await drag(page, '[data-lead-tag="wet-chalk-2"]', "h1");
     await expect(page.getByRole("button", { name: tag(2) })).toHaveCount(0);
     await saved(page);
@@ -42,10 +41,10 @@ test.describe("the board", () => {
     await page.goto(`${RIG}/songs/${song}`);
     const order = () => page.getByRole("group", { name: "Pads" }).locator("[data-card]").evaluateAll((cards) => cards.sort((a, b) => a.getBoundingClientRect().top - b.getBoundingClientRect().top).map((card) => card.getAttribute("data-card")));
     expect((await order()).slice(0, 2)).toEqual(["pad-kick", "pad-snare"]);
-    await drag(page, "[data-card=pad-kick] > button", "[data-card=pad-snare] > button");
+    await drag(page, "[data-card=pad-kick] > .tape", "[data-card=pad-snare] > .tape");
     await expect.poll(async () => (await order()).slice(0, 2)).toEqual(["pad-snare", "pad-kick"]);
     await saved(page);
-    await page.locator("[data-card=pad-snare] > button").focus();
+    await page.locator("[data-card=pad-snare] > .tape").focus();
     await page.keyboard.press("Space");
     await page.waitForTimeout(200);
     await page.keyboard.press("ArrowDown");
@@ -59,7 +58,7 @@ test.describe("the board", () => {
     await page.goto(`${RIG}/songs/${song}`);
     await page.getByRole("button", { name: /^Knobs of Low drum/ }).click();
     const dialog = page.getByRole("dialog");
-    await dialog.getByRole("button", { name: "Set it" }).first().click();
+    await dialog.getByRole("button", { name: "Set Pitch" }).click();
     await dialog.getByRole("slider").first().press("ArrowRight");
     await expect(dialog).toContainText("half past 12");
     await dialog.getByRole("button", { name: "Done" }).click();
@@ -118,9 +117,10 @@ test("two people on one song keep both their leads, and are asked about one knob
   await expect(two.getByRole("button", { name: /to Snare trigger · Pad in/ })).toBeVisible();
 
   await one.reload();
+  await Promise.all([one, two].map((page) => page.getByLabel("Fold unpatched cards").uncheck()));
   const turn = async (page: typeof one, key: string) => {
     await page.getByRole("button", { name: /^Knobs of Low drum/ }).click();
-    await page.getByRole("dialog").getByRole("button", { name: "Set it" }).first().click();
+    await page.getByRole("dialog").getByRole("button", { name: "Set Pitch" }).click();
     await page.getByRole("dialog").getByRole("slider").first().press(key);
     await page.getByRole("dialog").getByRole("button", { name: "Done" }).click();
   };

@@ -16,7 +16,7 @@ test("a board of 60 cards and 100 leads stays fluid while dragging", async ({ pa
     const kind = (["pad", "shaper", "voice", "desk-channel"] as const)[lane] as string;
     const details = kind === "pad" ? { kind, sensor: "resistive", restOhm: "47k", hitOhm: "10k", riseS: "1m", holdS: "5m", fallS: "30m", farad: null, peakV: null } : kind === "desk-channel" ? { kind, channel: (i >> 2) + 1 } : { kind };
     const signal = lane === 2 ? "audio" : "trigger";
-    const parts = lane === 3 ? [input("in 1", "audio"), input("in 2", "audio")] : lane === 0 ? [output("out 1", signal), output("out 2", signal)] : [input("in 1", "trigger"), input("in 2", "trigger"), output("out 1", signal), output("out 2", signal)];
+    const parts = lane === 3 ? [input("in-1", "audio"), input("in-2", "audio")] : lane === 0 ? [output("out-1", signal), output("out-2", signal)] : [input("in-1", "trigger"), input("in-2", "trigger"), output("out-1", signal), output("out-2", signal)];
     const response = await page.request.post(`${at}/gear`, { data: { name: `Card ${i + 1}`, notes: "", supplyId: null, details, jacks: parts, knobs: [], assumed: [] } });
     expect(response.status()).toBe(201);
     const { gear } = (await response.json()) as { gear: { jacks: { id: string; direction: string }[] } };
@@ -54,7 +54,7 @@ test("a board of 60 cards and 100 leads stays fluid while dragging", async ({ pa
     await page.mouse.up();
     await page.waitForTimeout(300);
   };
-  await sweep("[data-card] > button", 10, 420);
+  await sweep("[data-card] > .tape", 10, 420);
   await sweep("[data-jack]", 420, 300);
   const longTasks = await page.evaluate(() => (window as unknown as { longTasks: number[] }).longTasks);
   console.log("tasks over 50 ms while dragging:", longTasks);
