@@ -24,7 +24,7 @@ test("a newcomer makes gear from figures, patches it by drag and by keyboard, me
   await make("supply", "Nine volts", {});
   await make("pad", "Bucket pad", { "at rest": "45k–50k", "when hit": "9k–11k" });
   await make("conditioner", "Hot box", { "Output resistor": "1k", "Resistor across the output": "" });
-  await make("voice", "Bare chip", { "Highest safe level": "5.5" });
+  await make("voice", "Bare chip", { "Fires at": "0.8–2", "Lets go at": "0.8–2", "Lowest safe level": "-0.5", "Highest safe level": "5.5" });
 
   await page.goto(`${rig}/songs`);
   await page.getByRole("button", { name: "Add a song" }).click();
