@@ -5,7 +5,7 @@ import { useFormContext, useWatch } from "react-hook-form";
 import { Select } from "@/components/ui/inputs";
 import { Field } from "@/components/ui/field";
 import { startingGear } from "@/lib/core/electrics/starting-figures";
-import { simulateForPatch } from "@/lib/core/electrics/circuit/simulate-for-patch";
+import { simulateForPatch } from "@/lib/core/electrics/conditioner/simulate-for-patch";
 import type { ConditionerOutcome, ConditionerQuestion } from "@/lib/core/electrics/patch-types";
 import { gearInputSchema, type Gear } from "@/lib/schemas/gear";
 import type { GearFormValues } from "./form-values";

@@ -22,6 +22,7 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
 
   at.settledV(outHighV);
   const settledOut = at.outV;
+  const fullV = at.follower.emitterV;
   let capacitorV = at.settledV(restsHigh ? outHighV : outLowV);
   const restOut = at.outV;
   const restEmitterV = at.follower.emitterV;
@@ -47,8 +48,7 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
     at.want(stretch.fromS, stretch.volt, stretch.rate);
     at.look(timeS, capacitorV);
     note();
-    const isAbove = () => at.outV >= halfV;
-    watch.see(timeS, isAbove());
+    watch.see(timeS, at.outV >= halfV);
     let h = Math.min(untilS - timeS, 0.3 / -at.slope, (0.02 * highV) / (Math.abs(at.f) + 1e-9));
     for (let i = 0; i < MOST_STEPS && timeS < untilS; i += 1) {
       if (h > 0.999 * (untilS - timeS)) h = untilS - timeS;
@@ -69,10 +69,7 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
       const next = h === untilS - timeS ? untilS : timeS + h;
       at.look(next, step.y);
       const after = step.y;
-      if (stretch.rate === 0 && before < halfCapacitorV && after >= halfCapacitorV && stretch.volt >= halfV) {
-        const share = meetingOf(before, f, after, at.f, h, halfCapacitorV);
-        watch.see(timeS + share * h, true);
-      }
+      watchHalf(stretch, next, before < halfCapacitorV && after >= halfCapacitorV ? timeS + meetingOf(before, f, after, at.f, h, halfCapacitorV) * h : null);
       const emitterV = at.follower.emitterV;
       if (emitterV <= goalV && emitterBefore > goalV) {
         // The emitter follows the base smoothly; its own rate is the base's times how much of it gets through.
@@ -84,16 +81,18 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
       capacitorV = after;
       timeS = next;
       note();
-      if (stretch.rate !== 0) watchRamp(stretch, isAbove());
       h = nextStep(h, error, tolerance);
     }
     return false;
   }
 
-  /** On a ramp the limit and the ramp itself each may let the output cross; the ramp's own time is exact. */
-  function watchRamp(stretch: Stretch, above: boolean): void {
-    const crossing = meets(stretch, halfV);
-    watch.see(crossing !== null && crossing <= timeS && above === stretch.rate > 0 ? crossing : timeS, above);
+  /** The output crosses upwards when both its wanted level and what the limit leaves of it are there; it falls with the wanted level alone. */
+  function watchHalf(stretch: Stretch, nowS: number, filledS: number | null): void {
+    const wanted = stretch.rate !== 0 ? meets(stretch, halfV) : null;
+    const wantedS = wanted !== null && wanted <= nowS ? wanted : null;
+    const above = at.outV >= halfV;
+    if (above) watch.see(wantedS === null && filledS === null ? nowS : Math.max(wantedS ?? -Infinity, filledS ?? -Infinity), true);
+    else watch.see(wantedS ?? nowS, false);
   }
 
   let decayS = 0;
@@ -113,7 +112,7 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
     settledV: settledOut * triggerShare,
     highestV: highest * triggerShare,
     pulses: watch.close(stretches.at(-1)?.untilS ?? 0),
-    envelope: { restV: restEmitterV, peakV, decayS },
+    envelope: { restV: restEmitterV, peakV, fullV, decayS },
     nodes,
   };
 }

@@ -61,8 +61,13 @@ export interface Pulse {
   widthS: number;
 }
 
+export type FindingCode =
+  | "rests-high" | "threshold-out-of-reach" | "envelope-underfilled" | "double-trigger" | "decade-slip" | "slow-hit" | "divider-off"
+  | "noise-near-threshold" | "rests-negative" | "input-out-of-range" | "input-below-rail" | "battery" | "re-strike";
+
+/** Something a builder should know of this circuit, with its numbers; a fix has been solved before it is told. */
 export interface Finding {
-  code: string;
+  code: FindingCode;
   text: string;
   fix?: { text: string; [figure: string]: unknown };
 }
@@ -94,7 +99,8 @@ export interface Solution {
   restV: number;
   activeV: number;
   sourceOhm: number;
-  envelope: null | { restV: number; peakV: number; decayS: number };
+  /** At the emitter; `fullV` is where a pulse without end would take it. */
+  envelope: null | { restV: number; peakV: number; fullV: number; decayS: number };
   /** True where the comparator tripped, whatever its output then reached. */
   tripped: boolean;
   trace: Trace | null;

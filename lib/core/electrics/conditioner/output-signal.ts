@@ -15,6 +15,6 @@ export interface OutputSignal {
   settledV: number;
   highestV: number;
   pulses: Pulse[];
-  envelope: null | { restV: number; peakV: number; decayS: number };
+  envelope: null | { restV: number; peakV: number; fullV: number; decayS: number };
   nodes: EnvelopeNodes | null;
 }

@@ -4,6 +4,7 @@ import { sampleYield } from "../tolerance/sample-yield";
 import type { ConditionerResult, ConditionerSpec, Solution, Trace } from "./conditioner-types";
 import { findConditionerIssues } from "./find-conditioner-issues";
 import { findFindings } from "./findings/find-findings";
+import { isSound } from "./findings/scene";
 import { listAssumptions } from "./list-assumptions";
 import { settleCircuit } from "./settle-circuit";
 import { solveChoice } from "./solve-choice";
@@ -53,7 +54,6 @@ export function simulateConditioner(spec: ConditionerSpec): ConditionerResult {
   }, rounds > 1000 ? 2 : 0);
   const range = (name: Metric) => rangeOf(corners[names.indexOf(name)] as (typeof corners)[number]);
   const widths = corners[names.indexOf("pulseS")] as (typeof corners)[number];
-  const weakestHitOhm = weakestHit(circuit);
   return {
     fires: solution.fires,
     pad: { restV: solution.padRestV, hitV: solution.padHitV },
@@ -63,8 +63,8 @@ export function simulateConditioner(spec: ConditionerSpec): ConditionerResult {
     trigger: { restV: solution.restV, activeV: solution.activeV, sourceOhm: solution.sourceOhm },
     envelope: solution.envelope && { peakV: solution.envelope.peakV, decayS: solution.envelope.decayS },
     ruleOfThumbS: circuit.couplingOhm * circuit.couplingF,
-    weakestHitOhm,
-    findings: findFindings(spec, circuit, solution, weakestHitOhm),
+    weakestHitOhm: weakestHit(circuit),
+    findings: findFindings({ spec, circuit, solution }),
     trace: solution.trace as Trace,
     spread: {
       padHitV: range("padHitV"), shapedPeakV: range("shapedPeakV"), thresholdV: range("thresholdV"), restV: range("restV"), activeV: range("activeV"),
@@ -77,9 +77,4 @@ export function simulateConditioner(spec: ConditionerSpec): ConditionerResult {
     yield: sampleYield(parts, (choice) => isSound(solveChoice(spec, choice)), Math.min(SAMPLE, Math.ceil(rounds / 10)), SEED),
     assumptions: listAssumptions(spec),
   };
-}
-
-/** What a conditioner is for: one pulse a strike. */
-function isSound(solution: Solution): boolean {
-  return solution.fires && solution.pulses.length === 1 && !solution.latches;
 }

@@ -1,7 +1,7 @@
 import { formatQuantity, formatRange } from "@/lib/core/units/format-quantity";
-import { toRange, type Range, type Spread } from "@/lib/core/units/spread";
+import type { Range } from "@/lib/core/units/spread";
 import type { Output, Reason } from "../jacks";
-import type { ConditionerOutcome, ConditionerQuestion } from "../patch-types";
+import type { ConditionerOutcome, ConditionerQuestion, ConditionerSimulator } from "../patch-types";
 import { findCorners, rangeOf, type MetricCorners } from "../tolerance/find-corners";
 import { listParts } from "../tolerance/list-parts";
 import type { Circuit, ConditionerSpec, Solution } from "./conditioner-types";
@@ -10,10 +10,17 @@ import { nominal, settleCircuit } from "./settle-circuit";
 import { solveCircuit } from "./solve-circuit";
 import { Follower } from "./follower";
 
-/** Peak over threshold below which a hit fires with little to spare: a tenth, as for levels at a jack (electrics §2). */
-const TIGHT = 1.1;
+/** Room over the threshold below which a hit fires with little to spare, as for levels at a jack (electrics §2). */
+const TIGHT = { share: 0.1, leastV: 0.2 };
+/** Where a pad states no strike: common practice, no source. */
+const STRIKE = { riseS: 1e-3, holdS: 5e-3, fallS: 30e-3 };
+/** A contact, open and closed, Ω: a switch is a pad that goes all the way. Common practice, no source. */
+const CONTACT = { restOhm: 10e6, hitOhm: 1 };
+/** Answers kept: the same box and pad come again in every song, and the same question has the same answer. */
+const MOST_KEPT = 500;
+const kept = new Map<string, ConditionerOutcome>();
 
-const METRICS = ["margin", "tripV", "activeV", "restV", "sourceOhm", "pulseS", "limitA", "peakV", "envelopeRestV", "decayS", "followerOhm"] as const;
+const METRICS = ["marginV", "shapedPeakV", "tripV", "activeV", "restV", "sourceOhm", "pulseS", "limitA", "peakV", "envelopeRestV", "decayS", "followerOhm"] as const;
 type Metric = (typeof METRICS)[number];
 
 /**
@@ -21,7 +28,17 @@ type Metric = (typeof METRICS)[number];
  * @returns open-circuit figures of its outputs as ranges, and whether this pad fires it at all, surely, or with little to spare.
  * Limits: those of `simulateConditioner`; corners as in `findCorners`; piezo pads and pads with blank figures are `unproven`.
  */
-export function simulateForPatch(question: ConditionerQuestion): ConditionerOutcome {
+export const simulateForPatch: ConditionerSimulator = (question) => {
+  const key = JSON.stringify(question);
+  const known = kept.get(key);
+  if (known) return known;
+  const outcome = answer(question);
+  if (kept.size >= MOST_KEPT) kept.clear();
+  kept.set(key, outcome);
+  return outcome;
+};
+
+function answer(question: ConditionerQuestion): ConditionerOutcome {
   const blank = blankFigures(question);
   if (blank.length > 0) return unproven(blank);
   const spec = specOf(question);
@@ -29,18 +46,20 @@ export function simulateForPatch(question: ConditionerQuestion): ConditionerOutc
   if (issue) return unproven([{ verdict: "unproven", text: `This circuit cannot be computed: ${issue.path.join(".")}. ${issue.message}` }]);
   const parts = listParts(spec);
   let pulsesMost = 0;
+  let underfilled = false;
   let latches = false;
   const corners = findCorners(parts, (choice) => {
     const circuit = settleCircuit(spec, (spread, path) => choice[path] ?? nominal(spread, path));
     const solution = solveCircuit(circuit);
     pulsesMost = Math.max(pulsesMost, solution.pulses.length);
     latches ||= solution.latches;
+    underfilled ||= solution.tripped && !solution.fires;
     return measure(circuit, solution);
   }, 0);
   const of = (metric: Metric) => corners[METRICS.indexOf(metric)] as MetricCorners;
   const range = (metric: Metric) => rangeOf(of(metric));
   const trigger: Partial<Output> = { signal: "trigger", restV: range("restV"), sourceOhm: range("sourceOhm"), limitA: range("limitA") };
-  const reasons = judge(question, range("margin"), range("tripV"), pulsesMost, latches);
+  const reasons = judge({ margin: range("marginV"), peak: range("shapedPeakV"), trip: range("tripV"), width: range("pulseS"), pulses: pulsesMost, latches, underfilled });
   const verdict = reasons[0]?.verdict as ConditionerOutcome["verdict"];
   // A pulse that some corner lacks is no pulse to count on: the verdict says so, and the length is that of the ones that come.
   const width = range("pulseS");
@@ -57,8 +76,8 @@ export function simulateForPatch(question: ConditionerQuestion): ConditionerOutc
 function specOf({ circuit, pad, turn, loadOhm }: ConditionerQuestion): ConditionerSpec {
   return {
     supply: circuit.supply,
-    pad: { kind: "resistive", restOhm: pad.restOhm as Spread, hitOhm: pad.hitOhm as Spread, leg: circuit.padLeg },
-    strike: { riseS: pad.riseS as number, holdS: pad.holdS as number, fallS: pad.fallS as number },
+    pad: { kind: "resistive", restOhm: pad.restOhm ?? CONTACT.restOhm, hitOhm: pad.hitOhm ?? CONTACT.hitOhm, leg: circuit.padLeg },
+    strike: { riseS: pad.riseS ?? STRIKE.riseS, holdS: pad.holdS ?? STRIKE.holdS, fallS: pad.fallS ?? STRIKE.fallS },
     divider: circuit.divider,
     coupling: circuit.coupling,
     threshold: { ...circuit.threshold, turn },
@@ -69,14 +88,18 @@ function specOf({ circuit, pad, turn, loadOhm }: ConditionerQuestion): Condition
   };
 }
 
-const PAD_FIGURES = { restOhm: "its resistance at rest", hitOhm: "its resistance when hit", riseS: "how fast a hit rises", holdS: "how long a hit is held", fallS: "how long a hit takes to let go" } as const;
+const PAD_FIGURES = {
+  restOhm: "The pad’s resistance at rest is not known: measure it with a meter, nothing touching the pad.",
+  hitOhm: "The pad’s resistance when hit is not known: press it as hard as a hit and read a meter.",
+} as const;
 
 function blankFigures({ pad }: ConditionerQuestion): Reason[] {
-  if (pad.sensor === "piezo") return [{ verdict: "unproven", text: "This circuit is solved for a pad that is a resistance; a piezo disc gives a voltage of its own. Measure the output with the pad on it." }];
-  if (pad.sensor === "unknown") return [{ verdict: "unproven", text: "The pad's kind is not known, so what it gives is not either: say what sort of sensor it is." }];
-  return (Object.keys(PAD_FIGURES) as (keyof typeof PAD_FIGURES)[])
+  if (pad.sensor === "piezo") return [{ verdict: "unproven", text: "This circuit is solved for a pad that is a resistance; a piezo disc gives a voltage of its own. Play the pad on this box and record what comes out of it." }];
+  if (pad.sensor === "unknown") return [{ verdict: "unproven", text: "The pad’s kind is not known, so what it gives is not either: say what sort of sensor it is." }];
+  if (pad.sensor === "switch") return [];
+  return (["restOhm", "hitOhm"] as const)
     .filter((name) => pad[name] === undefined)
-    .map((name) => ({ verdict: "unproven" as const, text: `Of the pad ${PAD_FIGURES[name]} is missing.`, figure: `pad.${name}` }));
+    .map((name) => ({ verdict: "unproven" as const, text: PAD_FIGURES[name], figure: `pad.${name}` }));
 }
 
 function unproven(reasons: Reason[]): ConditionerOutcome {
@@ -94,21 +117,32 @@ function measure(circuit: Circuit, solution: Solution): number[] {
   const { envelope } = circuit;
   const peakV = solution.envelope?.peakV ?? 0;
   return [
-    circuit.tripV > 0 ? (solution.fires || !solution.tripped ? solution.shapedPeakV / circuit.tripV : 0) : 0,
-    circuit.tripV, activeV, open(solution.restV), solution.sourceOhm, solution.pulses[0]?.widthS ?? 0, limitA,
+    solution.shapedPeakV - circuit.tripV, solution.shapedPeakV, circuit.tripV, activeV, open(solution.restV), solution.sourceOhm, solution.pulses[0]?.widthS ?? 0, limitA,
     peakV, solution.envelope?.restV ?? 0, solution.envelope?.decayS ?? 0, envelope ? Follower.sourceOhm(peakV, envelope.emitterOhm) : 0,
   ];
 }
 
-function judge({ pad }: ConditionerQuestion, margin: Range, trip: Range, pulses: number, latches: boolean): Reason[] {
-  const hit = formatRange(toRange(pad.hitOhm as Spread), "Ohm");
-  if (trip.min <= 0) return [{ verdict: "stuck", text: `The threshold can lie at or below 0 V (${formatQuantity(trip.min, "V")}), so the comparator may rest high: turn the pot up.`, measured: trip.min, limit: 0, unit: "V" }];
-  if (latches) return [{ verdict: "stuck", text: "After a hit the comparator may never let go: its hysteresis is wider than its threshold." }];
-  const shares = { measured: margin.min, limit: 1, unit: "ratio" as const };
-  const percent = (ratio: number) => `${Number((ratio * 100).toPrecision(3))} %`;
-  if (margin.max <= 1) return [{ ...shares, verdict: "dead", measured: margin.max, text: `A hit down to ${hit} cannot fire it: its peak comes to ${percent(margin.max)} of the threshold at best.` }];
-  if (margin.min <= 1) return [{ ...shares, verdict: "weak", text: `A hit to ${hit} may not fire it: at worst its peak comes to ${percent(margin.min)} of the threshold.` }];
-  if (pulses > 1) return [{ verdict: "tight", text: `One hit can come out as ${pulses} pulses.`, measured: pulses, limit: 1, unit: "ratio" }];
-  if (margin.min < TIGHT) return [{ ...shares, verdict: "tight", text: `A hit to ${hit} just fires it: at worst its peak comes to ${percent(margin.min)} of the threshold.` }];
-  return [{ ...shares, verdict: "good", text: `A hit to ${hit} fires it at every corner: at worst its peak comes to ${percent(margin.min)} of the threshold.` }];
+interface Found {
+  margin: Range;
+  peak: Range;
+  trip: Range;
+  width: Range;
+  pulses: number;
+  latches: boolean;
+  underfilled: boolean;
+}
+
+function judge({ margin, peak, trip, width, pulses, latches, underfilled }: Found): Reason[] {
+  const numbers = { measured: peak.min, limit: trip.max, unit: "V" as const };
+  const levels = `A hit raises ${formatRange(peak, "V")} against a threshold of ${formatRange(trip, "V")}`;
+  if (trip.min <= 0) return [{ ...numbers, verdict: "stuck", measured: trip.min, limit: 0, text: `The threshold can lie at ${formatQuantity(trip.min, "V")}, not above the resting signal: turn it up, or the output may stay high.` }];
+  if (latches) return [{ ...numbers, verdict: "stuck", text: `${levels}, but after it the comparator may never let go: its hysteresis is wider than its threshold.` }];
+  if (margin.max <= 0) return [{ ...numbers, verdict: "dead", text: `${levels}: no hit of this pad can fire it.` }];
+  if (width.max <= 0) return [{ ...numbers, verdict: "dead", text: `${levels}, and the comparator trips, but its output never comes up: its load takes all the current it gives.` }];
+  if (margin.min <= 0) return [{ ...numbers, verdict: "weak", text: `${levels}: the weakest hit may not fire it.` }];
+  if (width.min <= 0 || underfilled) return [{ ...numbers, verdict: "weak", text: `${levels}, but its load may keep the comparator's output down.` }];
+  const pulse = `a pulse of ${formatRange(width, "s")}`;
+  if (pulses > 1) return [{ verdict: "tight", text: `${levels}: ${pulse}, but one hit can come out as ${pulses} pulses.`, measured: pulses, limit: 1 }];
+  if (margin.min < Math.max(TIGHT.share * trip.max, TIGHT.leastV)) return [{ ...numbers, verdict: "tight", text: `${levels}: it fires, ${pulse}, with ${formatQuantity(margin.min, "V")} to spare at the weakest.` }];
+  return [{ ...numbers, verdict: "good", text: `${levels}: ${pulse}.` }];
 }
