@@ -1,7 +1,7 @@
 import type { ChartMetrics } from "@/lib/core/chart";
 
 /** Sizes at full scale, px. */
-const FULL: ChartMetrics = { cardWidth: 196, tapeHeight: 26, jackPitch: 28, cardGap: 10, trackPitch: 12, outTagWidth: 34, inTagWidth: 152, gutterMin: 36, tagHeight: 20 };
+const FULL: ChartMetrics = { cardWidth: 196, tapeHeight: 26, jackPitch: 28, cardGap: 10, trackPitch: 12, outTagWidth: 34, inTagWidth: 152, gutterMin: 110, tagHeight: 20 };
 export const FOOT_HEIGHT = 28;
 export const FONT_PX = 14;
 /** Below this the lettering would be too small to read; the board then scrolls sideways in its own frame. */

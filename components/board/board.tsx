@@ -182,7 +182,7 @@ export function Board(props: BoardProps) {
         />
         {failed ? <Notice tone="error" title="Not checked" live className="mb-3">The server did not answer the check. The verdicts shown are from before; they follow with the next change.</Notice> : null}
         {editor.news ? <Notice tone="done" live className="mb-3">{editor.news} <button type="button" className="underline" onClick={editor.dismissNews}>Good</button></Notice> : null}
-        {armed ? <p role="status" className="mb-2 border-l-8 border-mark bg-bench px-3 py-1"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
+        {armed ? <p role="status" className="fixed bottom-4 left-1/2 z-10 max-w-[90vw] -translate-x-1/2 border-2 border-ink border-l-8 border-l-mark bg-bench px-3 py-1.5 shadow-lg"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
         <div ref={frameRef} className="w-full">
           {cards.length === 0 || (patch.leads.length === 0 && canEdit) ? <FirstRun rigId={rigId} gear={gear} can={can} /> : null}
           {showsRuns ? (

@@ -55,9 +55,10 @@ export const JackTag = memo(function JackTag({ jack, cardName, isPlugged, middle
       onClick={() => tap(jack.id)}
       style={{ top: middle - height / 2, height }}
       className={clsx(
-        "absolute flex max-w-[52%] touch-none items-center gap-1 px-1.5 text-[0.86em] leading-none whitespace-nowrap disabled:opacity-100",
+        "absolute flex touch-none items-center gap-1 px-1.5 text-[0.86em] leading-none whitespace-nowrap disabled:opacity-100",
         side === "in" ? "left-0 border-l-4 text-left" : "right-0 border-r-4 flex-row-reverse text-right",
         isPlugged ? "border-ink bg-floor font-semibold" : "border-line bg-floor",
+        outcome ? "z-[1] max-w-full" : "max-w-[52%]",
         isFrom && "bg-mark text-mark-ink",
         drop.isOver && isTarget && "outline-2 outline-offset-1 outline-ink",
         from !== null && !isTarget && !isFrom && "opacity-50",
