@@ -6,7 +6,7 @@ import { meets, PulseWatch } from "./pulse-watch";
 import { nextStep, Step, stepRosenbrock } from "./step-rosenbrock";
 import type { Stretch } from "./wanted-levels";
 
-const STEP_TOLERANCE = 1e-5;
+const STEP_TOLERANCE = 2.5e-5;
 const MOST_STEPS = 20_000;
 /** Time constants after which a fall that has not come to peak/e never will. */
 const LONGEST_FALL = 60;
@@ -20,9 +20,6 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
   const halfCapacitorV = at.capacitorReaching(halfV);
   const step = new Step();
 
-  at.settledV(outHighV);
-  const settledOut = at.outV;
-  const fullV = at.follower.emitterV;
   let capacitorV = at.settledV(restsHigh ? outHighV : outLowV);
   const restOut = at.outV;
   const restEmitterV = at.follower.emitterV;
@@ -107,12 +104,15 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
     decayS = timeS - lastHighS;
     if (keepNodes) run({ ...stretch, fromS: timeS, untilS: timeS + decayS / 2 }, -Infinity);
   });
+  const pulses = watch.close(stretches.at(-1)?.untilS ?? 0);
+  // Where a pulse without end would go: asked for only where there is none to see, or everything is wanted.
+  if (keepNodes || pulses.length === 0) at.settledV(outHighV);
   return {
     restV: restOut * triggerShare,
-    settledV: settledOut * triggerShare,
+    settledV: at.outV * triggerShare,
     highestV: highest * triggerShare,
-    pulses: watch.close(stretches.at(-1)?.untilS ?? 0),
-    envelope: { restV: restEmitterV, peakV, fullV, decayS },
+    pulses,
+    envelope: { restV: restEmitterV, peakV, fullV: at.follower.emitterV, decayS },
     nodes,
   };
 }

@@ -99,7 +99,7 @@ export interface Solution {
   restV: number;
   activeV: number;
   sourceOhm: number;
-  /** At the emitter; `fullV` is where a pulse without end would take it. */
+  /** At the emitter; `fullV`, known of a whole solution, is where a pulse without end would take it. */
   envelope: null | { restV: number; peakV: number; fullV: number; decayS: number };
   /** True where the comparator tripped, whatever its output then reached. */
   tripped: boolean;

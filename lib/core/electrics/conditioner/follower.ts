@@ -4,6 +4,10 @@ import { THERMAL_V } from "./junctions";
 const NPN = { isA: 6.734e-15, bf: 416.4, iseA: 6.734e-15, neV: 1.259 * THERMAL_V, vafV: 74, ikfA: 66.78e-3 };
 
 const MOST_ROUNDS = 100;
+const PER_VT = 1 / THERMAL_V;
+const PER_LEAK_VT = 1 / NPN.neV;
+/** A last step this small leaves some 10⁻⁵ of the current. */
+const CLOSE_V = 1e-4;
 
 /**
  * Emitter follower: base at the envelope capacitor, collector at the supply, resistor to 0 V. Forward half of the
@@ -11,7 +15,8 @@ const MOST_ROUNDS = 100;
  * the base stays below the supply.
  */
 export class Follower {
-  baseEmitterV = 1e-9;
+  private baseEmitterV = 1e-9;
+  private baseV = -1e3;
   emitterV = 1e-300;
   baseA = 1e-300;
   /** ∂I_b/∂V_b, S. */
@@ -29,29 +34,31 @@ export class Follower {
   solve(baseV: number): void {
     const { collectorV, emitterOhm } = this;
     const q1 = 1 / (1 + (collectorV - baseV) / NPN.vafV);
-    let vbe = this.baseEmitterV < baseV + 0.05 ? this.baseEmitterV : baseV;
-    if (vbe > 1) vbe = 0.7;
+    const change = baseV - this.baseV;
+    // Near the last answer the junction takes what the emitter does not follow of a change.
+    let vbe = change < 0.5 && change > -0.5 ? this.baseEmitterV + change * (1 - this.gain) : Math.min(baseV, 0.65);
     let base = 0;
     let baseSlope = 0;
     let emitterSlope = 0;
     for (let i = 0; i < MOST_ROUNDS; i += 1) {
-      const exp = Math.exp(vbe / THERMAL_V);
-      const leakExp = Math.exp(vbe / NPN.neV);
+      const exp = Math.exp(vbe * PER_VT);
+      const leakExp = Math.exp(vbe * PER_LEAK_VT);
       const forward = NPN.isA * (exp - 1);
-      const forwardSlope = (NPN.isA * exp) / THERMAL_V;
+      const forwardSlope = NPN.isA * PER_VT * exp;
       const root = Math.sqrt(1 + (4 * (forward > 0 ? forward : 0)) / NPN.ikfA);
       const qb = 0.5 * q1 * (1 + root);
       const transport = forward / qb;
       base = forward / NPN.bf + NPN.iseA * (leakExp - 1);
-      baseSlope = forwardSlope / NPN.bf + (NPN.iseA * leakExp) / NPN.neV;
+      baseSlope = forwardSlope / NPN.bf + NPN.iseA * PER_LEAK_VT * leakExp;
       emitterSlope = (forwardSlope - (transport * q1 * forwardSlope) / (NPN.ikfA * root)) / qb + baseSlope;
       const step = (baseV - vbe - emitterOhm * (transport + base)) / (1 + emitterOhm * emitterSlope);
       vbe += step > 2 * THERMAL_V ? THERMAL_V * (1 + Math.log(step / THERMAL_V)) : step;
-      if (step < 1e-5 && step > -1e-5) {
+      if (step < CLOSE_V && step > -CLOSE_V) {
         base += baseSlope * step;
         break;
       }
     }
+    this.baseV = baseV;
     this.baseEmitterV = vbe;
     this.emitterV = baseV - vbe;
     this.baseA = base;

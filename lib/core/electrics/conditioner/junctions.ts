@@ -5,17 +5,23 @@ export const THERMAL_V = (1.380649e-23 * 300.15) / 1.602176634e-19;
 export const DIODE_A = 2.52e-9;
 export const DIODE_NV = 1.752 * THERMAL_V;
 export const DIODE_OHM = 0.568;
+const PER_NV = 1 / DIODE_NV;
 
 /** Further below 0 V than this a junction passes its saturation current and nothing more, to one part in 60,000. */
 const BLOCKED_V = -0.5;
 const MOST_ROUNDS = 100;
 
-/** A diode in series with a resistor across a voltage; kept between calls, as the last answer is the best first guess. */
+/** A last step this small leaves 10⁻⁵ of the current, which one more term of the series takes away. */
+const CLOSE_V = 2e-4;
+
+/** A diode in series with a resistor across a voltage; kept between calls, as the last answer leads to a good first guess. */
 export class DiodeBranch {
-  junctionV = -1e-9;
   ampere = 1e-300;
   /** Of diode and resistor together, S. */
   siemens = 1e-300;
+  private junctionV = -1e-9;
+  private volt = 1e-300;
+  private ohm = 1e-300;
 
   /**
    * Solves v = V_j + R·I_s(exp(V_j/nV_T) − 1) by Newton. The left side is convex and rising, so that from above it comes
@@ -25,28 +31,35 @@ export class DiodeBranch {
    */
   solve(volt: number, ohm: number): void {
     if (volt < BLOCKED_V) {
-      this.junctionV = volt;
+      this.volt = volt;
       this.ampere = -DIODE_A;
       this.siemens = 0;
+      this.junctionV = volt;
+      this.ohm = ohm;
       return;
     }
-    let junction = this.junctionV;
-    if (!(junction > BLOCKED_V && junction <= Math.max(volt, 0.05))) junction = highestJunction(volt, ohm);
+    const change = volt - this.volt;
+    // Near the last answer the junction takes what the resistor leaves of a change.
+    let junction = change < 0.3 && change > -0.3 && ohm < 3 * this.ohm && this.junctionV > BLOCKED_V
+      ? this.junctionV + change * (1 - ohm * this.siemens)
+      : highestJunction(volt, ohm);
     let exp = 0;
     for (let i = 0; i < MOST_ROUNDS; i += 1) {
-      exp = Math.exp(junction / DIODE_NV);
-      const step = (volt - junction - ohm * DIODE_A * (exp - 1)) / (1 + (ohm * DIODE_A * exp) / DIODE_NV);
-      if (step > 4 * DIODE_NV) junction = Math.min(junction + step, highestJunction(volt, ohm));
-      else junction += step;
-      if (step < 1e-5 && step > -1e-5) {
-        // One part in 10⁷ of current is left: follow it to first order.
-        exp *= 1 + step / DIODE_NV;
+      exp = Math.exp(junction * PER_NV);
+      const step = (volt - junction - ohm * DIODE_A * (exp - 1)) / (1 + ohm * DIODE_A * PER_NV * exp);
+      junction += step;
+      if (step < CLOSE_V && step > -CLOSE_V) {
+        const turn = step * PER_NV;
+        exp *= 1 + turn + 0.5 * turn * turn;
         break;
       }
+      if (step > 4 * DIODE_NV) junction = Math.min(junction, highestJunction(volt, ohm));
     }
     this.junctionV = junction;
+    this.volt = volt;
+    this.ohm = ohm;
     this.ampere = DIODE_A * (exp - 1);
-    const own = (DIODE_A * exp) / DIODE_NV;
+    const own = DIODE_A * PER_NV * exp;
     this.siemens = own / (1 + ohm * own);
   }
 }

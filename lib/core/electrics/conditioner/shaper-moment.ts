@@ -2,8 +2,8 @@ import type { Circuit } from "./conditioner-types";
 import { DIODE_A, DIODE_OHM, DiodeBranch } from "./junctions";
 import type { Moment } from "./step-rosenbrock";
 
-/** Above this the clamp blocks, V. */
-const BLOCKED_V = 0.5;
+/** Above this the clamp passes its saturation current and nothing more, to one part in a hundred of that, V. */
+export const BLOCKED_V = 0.2;
 
 /**
  * Pad, divider, coupling capacitor, its resistor and the clamp, at one moment. The state is the voltage on the capacitor;
@@ -23,7 +23,7 @@ export class ShaperMoment implements Moment {
   sourceOhm = 1e-300;
   private startS = 1e-300;
   private siemens = 1e-300;
-  private siemensRate = 1e-300;
+  siemensRate = 1e-300;
   private readonly clamp = new DiodeBranch();
   private readonly fixed: number;
 

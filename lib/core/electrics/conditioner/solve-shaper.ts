@@ -1,6 +1,7 @@
 import type { Circuit } from "./conditioner-types";
 import { hermite, meetingOf, turnOf } from "./hermite";
-import { ShaperMoment } from "./shaper-moment";
+import { DIODE_A } from "./junctions";
+import { BLOCKED_V, ShaperMoment } from "./shaper-moment";
 import { nextStep, Step, stepRosenbrock } from "./step-rosenbrock";
 import { strikeConductance } from "./strike-conductance";
 
@@ -34,17 +35,20 @@ export interface Shaped {
 }
 
 /** Share of the supply that one step may be wrong by. */
-const STEP_TOLERANCE = 1e-5;
+const STEP_TOLERANCE = 2.5e-5;
+/** A level far enough above where the clamp begins to be worth a closed form, V. */
+const CLOSED_FORM_V = 1.2 * BLOCKED_V;
 const MOST_STEPS = 400_000;
 /** Time constants after the strike in which everything has died away. */
 const TAIL = 40;
 
 /**
  * Divider, coupling capacitor and clamp, from the settled rest through the strike, and the comparator's decisions on it.
- * After the strike nothing drives the one state, so it goes one way: once the comparator is low there is no more to see.
- * @param keepNodes true: record the steps and follow the tail to its end.
+ * Where the open divider's level falls or stands, the shaped one cannot rise above 0 V; so once the comparator is low and
+ * nothing rises any more, there is no more to decide, and the rest is left out unless it is asked for.
+ * @param whole true: follow everything to its end and record the steps; else `leastV` is as far as was followed.
  */
-export function solveShaper(circuit: Circuit, restsHigh: boolean, keepNodes: boolean): Shaped {
+export function solveShaper(circuit: Circuit, restsHigh: boolean, whole: boolean): Shaped {
   const { times, siemens } = strikeConductance(circuit);
   const { tripV, releaseV } = circuit;
   const corners = times.length;
@@ -56,7 +60,7 @@ export function solveShaper(circuit: Circuit, restsHigh: boolean, keepNodes: boo
   at.enter(startS, siemens[0] as number, 0);
   const padRestV = at.openV();
   let capacitorV = padRestV;
-  const nodes: Nodes | null = keepNodes ? { timeS: [startS], padV: [padRestV], padRate: [0], shapedV: [0], shapedRate: [0] } : null;
+  const nodes: Nodes | null = whole ? { timeS: [startS], padV: [padRestV], padRate: [0], shapedV: [0], shapedRate: [0] } : null;
   const flips: Flip[] = [];
   let isHigh = restsHigh;
   let padMostV = padRestV;
@@ -66,6 +70,8 @@ export function solveShaper(circuit: Circuit, restsHigh: boolean, keepNodes: boo
   let steps = 0;
   let endS = strikeEndS;
   let t = startS;
+  const lastRise = lastRising(siemens, circuit.leg);
+  const risesWhenHit = (circuit.leg === "upper") === circuit.hitOhm <= circuit.restOhm;
 
   for (let corner = 0; corner < corners; corner += 1) {
     const isTail = corner === corners - 1;
@@ -79,7 +85,12 @@ export function solveShaper(circuit: Circuit, restsHigh: boolean, keepNodes: boo
     if (isTail) {
       until = from + TAIL * (at.sourceOhm + circuit.couplingOhm) * circuit.couplingF;
       endS = until;
+      // Where the pad is left for good the capacitor takes in all that is between, and the pad's level comes to the open one.
+      padMostV = Math.max(padMostV, at.openV());
+      padLeastV = Math.min(padLeastV, at.openV());
     }
+    const falls = circuit.leg === "upper" ? at.siemensRate < 0 : at.siemensRate > 0;
+    const mayStop = !whole && (isTail || (risesWhenHit && falls && corner > lastRise));
     let h = Math.min(until - from, 0.25 * at.sourceScaleS(), -0.3 / at.slope);
     let mayCut = true;
     for (;;) {
@@ -98,8 +109,29 @@ export function solveShaper(circuit: Circuit, restsHigh: boolean, keepNodes: boo
       nodes?.padRate.push(at.padRate);
       nodes?.shapedV.push(s0);
       nodes?.shapedRate.push(at.shapedRate);
-      if (t >= until || steps > MOST_STEPS || (isTail && !keepNodes && !isHigh)) break;
+      if (t >= until || steps > MOST_STEPS || (mayStop && !isHigh && (isTail || at.padRate <= 0))) break;
 
+      if (at.siemensRate === 0 && s0 > CLOSED_FORM_V) {
+        // The clamp blocks and nothing moves: an exponential, up to the next thing that happens.
+        steps += 1;
+        const tauS = -1 / at.slope;
+        const floorV = -DIODE_A * circuit.couplingOhm;
+        let length = Math.min(until - t, tauS * Math.log((s0 - floorV) / (BLOCKED_V - floorV)));
+        if (whole) length = Math.min(length, tauS / 2);
+        // A hair below the level, so that it counts as passed.
+        const releaseS = tauS * Math.log((s0 - floorV) / (releaseV - floorV)) + 1e-9 * tauS;
+        const passes = isHigh && releaseS < length;
+        if (passes) length = Math.max(releaseS, 0);
+        capacitorV += at.f * tauS * (1 - Math.exp(-length / tauS));
+        t = until - t <= length ? until : t + length;
+        at.look(t, capacitorV);
+        if (passes) {
+          isHigh = false;
+          flips.push({ timeS: t, high: false });
+        }
+        h = Math.min(until - t, 0.3 * tauS);
+        continue;
+      }
       const { f, slope, drift, shapedRate: d0, padV: p0, padRate: q0 } = at;
       let error = Infinity;
       for (;;) {
@@ -151,4 +183,13 @@ export function solveShaper(circuit: Circuit, restsHigh: boolean, keepNodes: boo
     }
   }
   return { padRestV, padMostV, padLeastV, peakV, leastV, flips, startS, strikeEndS, endS, nodes };
+}
+
+/** The last stretch in which the open divider's level rises; −1 where none does. */
+function lastRising(siemens: readonly number[], leg: Circuit["leg"]): number {
+  for (let i = siemens.length - 2; i >= 0; i -= 1) {
+    const change = (siemens[i + 1] as number) - (siemens[i] as number);
+    if (leg === "upper" ? change > 0 : change < 0) return i;
+  }
+  return -1;
 }

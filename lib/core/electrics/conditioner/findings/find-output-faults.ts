@@ -44,8 +44,8 @@ export function findUnderfilled(scene: Scene): Finding[] {
     // The fall keeps its length where R grows as C shrinks.
     const ohm = preferredAbove((envelope.ohm * envelope.farad) / farad, "E12");
     const tried = trySettled(scene, { envelope: { ...envelope, farad, ohm } });
-    if (isSound(tried) && tried.envelope && tried.envelope.peakV >= WELL_FILLED * tried.envelope.fullV) {
-      return [{ code: "envelope-underfilled", text, fix: { text: `${farads(farad)} with ${ohms(ohm)} fills to ${volts(tried.envelope.peakV)} (${percent(tried.envelope.peakV / tried.envelope.fullV)}) and falls in ${seconds(tried.envelope.decayS)}.`, envelope: { farad, ohm } } }];
+    if (isSound(tried) && tried.envelope && tried.envelope.peakV >= WELL_FILLED * fullV) {
+      return [{ code: "envelope-underfilled", text, fix: { text: `${farads(farad)} with ${ohms(ohm)} fills to ${volts(tried.envelope.peakV)} (${percent(tried.envelope.peakV / fullV)}) and falls in ${seconds(tried.envelope.decayS)}.`, envelope: { farad, ohm } } }];
     }
   }
   return [{ code: "envelope-underfilled", text }];
