@@ -1,5 +1,5 @@
 "use client";
-import { closestCenter, DndContext, DragOverlay, KeyboardSensor, PointerSensor, pointerWithin, useSensor, useSensors, type Announcements, type CollisionDetection, type DragEndEvent, type DragStartEvent } from "@dnd-kit/core";
+import { closestCenter, DndContext, DragOverlay, KeyboardSensor, PointerSensor, useSensor, useSensors, type Announcements, type CollisionDetection, type DragEndEvent, type DragStartEvent, type Modifier } from "@dnd-kit/core";
 import { SortableContext, sortableKeyboardCoordinates, verticalListSortingStrategy } from "@dnd-kit/sortable";
 import { memo, useId, useMemo, useState } from "react";
 import type { Chain, ChartLayout, PlacedJack } from "@/lib/core/chart";
@@ -12,8 +12,9 @@ import { BoardCard } from "./board-card";
 import { LANE_NAMES } from "./board-lanes";
 import { FONT_PX, FOOT_HEIGHT, scaledMetrics } from "./board-metrics";
 import type { Names } from "./describe-changes";
-import { dragDataOf } from "./drag-data";
+import { dragDataOf, type Grabbed } from "./drag-data";
 import { LeadTag } from "./lead-tag";
+import { PlugSurface } from "./plug-surface";
 
 interface BoardCanvasProps {
   cards: readonly Gear[];
@@ -36,16 +37,21 @@ interface BoardCanvasProps {
   onMoveCard: (cardId: string, overId: string) => void;
 }
 
-/** Cards are dropped among their own lane, leads on jacks under the pointer. */
+/** Cards are dropped among their own lane; leads are looked up by the plugging surface. */
 const collide: CollisionDetection = (args) => {
   const active = dragDataOf(args.active.data.current);
+  if (active?.type !== "card") return [];
   const droppableContainers = args.droppableContainers.filter((container) => {
     const target = dragDataOf(container.data.current);
-    if (active?.type === "card") return target?.type === "card" && target.lane === active.lane;
-    if (target?.type !== "jack" || !String(container.id).startsWith("on:")) return false;
-    return active?.type === "jack" ? target.side !== active.side : target.side === "in";
+    return target?.type === "card" && target.lane === active.lane;
   });
-  return active?.type === "card" ? closestCenter({ ...args, droppableContainers }) : pointerWithin({ ...args, droppableContainers });
+  return closestCenter({ ...args, droppableContainers });
+};
+
+/** What is dragged from the plugging surface hangs at the pointer, not at the surface's corner. */
+const atPointer: Modifier = ({ active, activatorEvent, draggingNodeRect, transform }) => {
+  if (dragDataOf(active?.data.current)?.type !== "plug" || !(activatorEvent instanceof PointerEvent) || !draggingNodeRect) return transform;
+  return { ...transform, x: transform.x + activatorEvent.clientX - draggingNodeRect.left + 14, y: transform.y + activatorEvent.clientY - draggingNodeRect.top - 14 };
 };
 
 const NO_JACKS: readonly PlacedJack[] = [];
@@ -86,29 +92,32 @@ export const BoardCanvas = memo(function BoardCanvas(props: BoardCanvasProps) {
 
   function describe(id: string | number, data: unknown): string {
     const item = dragDataOf(data);
-    if (item?.type === "card") return nameOf(item.cardId);
-    if (item?.type === "jack") return names.jack(item.jackId);
-    if (item?.type === "lead") return `lead ${leadsById.get(item.leadId)?.number ?? ""}`;
-    return String(id);
+    return item?.type === "card" ? nameOf(item.cardId) : item?.type === "plug" ? "a lead" : String(id);
   }
 
   function onDragStart({ active }: DragStartEvent) {
     const item = dragDataOf(active.data.current);
-    setDragged(describe(active.id, active.data.current));
-    if (item?.type === "jack") props.onJackDrag(item.jackId);
-    if (item?.type === "lead") props.onJackDrag(leadsById.get(item.leadId)?.outputId ?? null);
+    if (item?.type === "card") setDragged(nameOf(item.cardId));
   }
 
   function onDragEnd({ active, over }: DragEndEvent) {
     const [item, target] = [dragDataOf(active.data.current), dragDataOf(over?.data.current)];
     setDragged(null);
-    props.onJackDrag(null);
     if (item?.type === "card" && target?.type === "card") props.onMoveCard(item.cardId, target.cardId);
-    if (item?.type === "jack" && target?.type === "jack") props.onPlug(item.jackId, target.jackId);
-    if (item?.type === "lead") {
-      if (target?.type === "jack") props.onMoveEnd(item.leadId, target.jackId);
-      else props.onUnplug([item.leadId]);
-    }
+  }
+
+  function onGrab(grabbed: Grabbed | null) {
+    const lead = grabbed?.type === "lead" ? leadsById.get(grabbed.leadId) : undefined;
+    const jackId = grabbed?.type === "jack" ? grabbed.jackId : (lead?.outputId ?? null);
+    setDragged(lead ? `Lead ${lead.number}` : jackId === null ? null : names.jack(jackId));
+    props.onJackDrag(jackId);
+  }
+
+  function onDrop(grabbed: Grabbed, jackId: string | null) {
+    if (grabbed.type === "jack") {
+      if (jackId !== null) props.onPlug(grabbed.jackId, jackId);
+    } else if (jackId !== null) props.onMoveEnd(grabbed.leadId, jackId);
+    else props.onUnplug([grabbed.leadId]);
   }
 
   return (
@@ -119,69 +128,68 @@ export const BoardCanvas = memo(function BoardCanvas(props: BoardCanvasProps) {
       accessibility={{ announcements, screenReaderInstructions: { draggable: "Space picks the card up; arrow keys move it within its lane; Space puts it down, Escape puts it back." } }}
       onDragStart={onDragStart}
       onDragEnd={onDragEnd}
-      onDragCancel={() => {
-        setDragged(null);
-        props.onJackDrag(null);
-      }}
+      onDragCancel={() => setDragged(null)}
     >
-      <div style={{ width: layout.width, fontSize: FONT_PX * scale }}>
-        <div className="relative h-8" aria-hidden="true">
-          {layout.lanes.map((lane, index) => (
-            <span key={lane.x} style={{ left: lane.x, width: lane.width }} className="absolute border-b-2 border-line text-base font-bold text-ink-soft">{LANE_NAMES[index]}</span>
-          ))}
+      <PlugSurface canEdit={canEdit} onGrab={onGrab} onDrop={onDrop}>
+        <div style={{ width: layout.width, fontSize: FONT_PX * scale }}>
+          <div className="relative h-8" aria-hidden="true">
+            {layout.lanes.map((lane, index) => (
+              <span key={lane.x} style={{ left: lane.x, width: lane.width }} className="absolute border-b-2 border-line text-base font-bold text-ink-soft">{LANE_NAMES[index]}</span>
+            ))}
+          </div>
+          <div className="relative" style={{ width: layout.width, height: layout.height + 8 }}>
+            <ChartTracks layout={layout} verdicts={verdicts} chain={chain?.leadIds ?? null} onPick={props.onPickLead} />
+            {lanes.map((ids, lane) => (
+              <SortableContext key={LANE_NAMES[lane]} id={LANE_NAMES[lane]} items={ids} strategy={verticalListSortingStrategy}>
+                <div role="group" aria-label={LANE_NAMES[lane]}>
+                  {cards.map((gear) => {
+                    const box = boxes.get(gear.id);
+                    if (!box || box.lane !== lane) return null;
+                    return (
+                      <BoardCard
+                        key={gear.id}
+                        gear={gear}
+                        box={box}
+                        jacks={jacksOf.get(gear.id) ?? NO_JACKS}
+                        plugged={plugged}
+                        knobs={knobsOf.get(gear.id) ?? NO_KNOBS}
+                        isDim={chain !== null && !chain.cardIds.has(gear.id)}
+                        isPicked={props.pickedCardId === gear.id}
+                        canEdit={canEdit}
+                        tapeHeight={metrics.tapeHeight}
+                        rowHeight={metrics.jackPitch}
+                        footHeight={gear.knobs.length > 0 ? footHeight : 0}
+                        onPick={props.onPickCard}
+                        onKnobs={props.onKnobs}
+                      />
+                    );
+                  })}
+                </div>
+              </SortableContext>
+            ))}
+            {layout.tags.map((tag) => {
+              const leads = tag.leadIds.map((id) => leadsById.get(id)).filter((lead): lead is Lead => lead !== undefined);
+              const first = leads[0];
+              if (!first) return null;
+              return (
+                <LeadTag
+                  key={`${tag.end}:${tag.jackId}`}
+                  tag={tag}
+                  leads={leads}
+                  check={check.leads[first.id]}
+                  label={tag.end === "in" ? `${names.jack(first.outputId)} to ${names.jack(first.inputId)}` : `at ${names.jack(first.outputId)}`}
+                  isDim={chain !== null && !leads.some((lead) => chain.leadIds.has(lead.id))}
+                  isPicked={leads.some((lead) => lead.id === props.pickedLeadId)}
+                  canEdit={canEdit}
+                  onPick={props.onPickLead}
+                  onUnplug={props.onUnplug}
+                />
+              );
+            })}
+          </div>
         </div>
-        <div className="relative" style={{ width: layout.width, height: layout.height + 8 }}>
-          <ChartTracks layout={layout} verdicts={verdicts} chain={chain?.leadIds ?? null} onPick={props.onPickLead} />
-          {lanes.map((ids, lane) => (
-            <SortableContext key={LANE_NAMES[lane]} id={LANE_NAMES[lane]} items={ids} strategy={verticalListSortingStrategy}>
-              <div role="group" aria-label={LANE_NAMES[lane]}>
-                {cards.map((gear) => {
-                  const box = boxes.get(gear.id);
-                  if (!box || box.lane !== lane) return null;
-                  return (
-                    <BoardCard
-                      key={gear.id}
-                      gear={gear}
-                      box={box}
-                      jacks={jacksOf.get(gear.id) ?? NO_JACKS}
-                      plugged={plugged}
-                      knobs={knobsOf.get(gear.id) ?? NO_KNOBS}
-                      isDim={chain !== null && !chain.cardIds.has(gear.id)}
-                      isPicked={props.pickedCardId === gear.id}
-                      canEdit={canEdit}
-                      tapeHeight={metrics.tapeHeight}
-                      rowHeight={metrics.jackPitch}
-                      footHeight={gear.knobs.length > 0 ? footHeight : 0}
-                      onPick={props.onPickCard}
-                      onKnobs={props.onKnobs}
-                    />
-                  );
-                })}
-              </div>
-            </SortableContext>
-          ))}
-          {layout.tags.map((tag) => {
-            const leads = tag.leadIds.map((id) => leadsById.get(id)).filter((lead): lead is Lead => lead !== undefined);
-            const first = leads[0];
-            if (!first) return null;
-            return (
-              <LeadTag
-                key={`${tag.end}:${tag.jackId}`}
-                tag={tag}
-                leads={leads}
-                check={check.leads[first.id]}
-                label={tag.end === "in" ? `${names.jack(first.outputId)} to ${names.jack(first.inputId)}` : `at ${names.jack(first.outputId)}`}
-                isDim={chain !== null && !leads.some((lead) => chain.leadIds.has(lead.id))}
-                isPicked={leads.some((lead) => lead.id === props.pickedLeadId)}
-                canEdit={canEdit}
-                onPick={props.onPickLead}
-                onUnplug={props.onUnplug}
-              />
-            );
-          })}
-        </div>
-      </div>
-      <DragOverlay dropAnimation={null}>
+      </PlugSurface>
+      <DragOverlay dropAnimation={null} modifiers={[atPointer]} className="pointer-events-none">
         {dragged ? <span className="tape pointer-events-none inline-block px-3 py-1 text-xl whitespace-nowrap shadow-lg">{dragged}</span> : null}
       </DragOverlay>
     </DndContext>

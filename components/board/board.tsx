@@ -157,7 +157,9 @@ export function Board(props: BoardProps) {
 
   useBoardKeys({ onUndo: editor.undo, onRedo: editor.redo, onRuns: () => setView((before) => (before === "runs" ? "board" : "runs")), onEscape: letGo });
   useEffect(() => {
-    if (pickedLeadId) document.querySelector<HTMLElement>("[data-lead-panel]")?.focus({ preventScroll: true });
+    if (!pickedLeadId) return;
+    document.querySelector<HTMLElement>("[data-lead-panel]")?.focus({ preventScroll: true });
+    document.querySelector<HTMLElement>("[data-lead-tag][data-picked]")?.scrollIntoView({ block: "nearest" });
   }, [pickedLeadId]);
 
   const leadLabel = useCallback((lead: Lead) => `${names.jack(lead.outputId)} → ${names.jack(lead.inputId)}`, [names]);
@@ -171,7 +173,7 @@ export function Board(props: BoardProps) {
 
   return (
     <PluggingContext.Provider value={plugging}>
-      <div className={picked ? "pb-[60dvh]" : ""}>
+      <div className={picked ? "pb-[50dvh]" : ""}>
         <BoardToolbar
           editor={editor} check={check} isChecking={isChecking} canEdit={canEdit} isNarrow={isNarrow} view={view} onView={setView} fits={fits} onFits={setFits}
           foldsFree={foldsFree} onFolds={(folds) => {

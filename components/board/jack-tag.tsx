@@ -1,12 +1,10 @@
 "use client";
-import { useDraggable, useDroppable } from "@dnd-kit/core";
 import clsx from "clsx";
 import { memo, type KeyboardEvent } from "react";
 import type { Jack } from "@/lib/schemas/jack";
 import { VERDICT_TONE } from "../chart/verdict-tone";
 import { usePlugging } from "./board-context";
 import { sideOf } from "./board-lanes";
-import type { DragData } from "./drag-data";
 
 interface JackTagProps {
   jack: Jack;
@@ -17,13 +15,10 @@ interface JackTagProps {
   height: number;
 }
 
-/** A jack's label: drag it onto another, tap it and then the other, or press Enter for the list of free jacks. */
+/** A jack's label (the canvas watches for drags): drag it onto another, tap it and then the other, or press Enter for the list of free jacks. */
 export const JackTag = memo(function JackTag({ jack, cardName, isPlugged, middle, height }: JackTagProps) {
   const side = sideOf(jack.direction);
   const { from, would, canEdit, tap, openList, unplugJack } = usePlugging();
-  const data: DragData = { type: "jack", jackId: jack.id, side };
-  const drag = useDraggable({ id: `jack:${jack.id}`, data, disabled: !canEdit });
-  const drop = useDroppable({ id: `on:${jack.id}`, data, disabled: !canEdit });
   const isFrom = from?.jackId === jack.id;
   const isTarget = from !== null && from.side !== side;
   const outcome = isTarget ? would.get(jack.id) : undefined;
@@ -41,16 +36,12 @@ export const JackTag = memo(function JackTag({ jack, cardName, isPlugged, middle
 
   return (
     <button
-      ref={(node) => {
-        drag.setNodeRef(node);
-        drop.setNodeRef(node);
-      }}
       type="button"
       data-jack={jack.id}
+      data-side={side}
       aria-label={`${cardName}, ${jack.name}, ${jack.direction}${isPlugged ? ", plugged" : ", free"}${outcome ? `, would be ${outcome.verdict}` : ""}`}
       aria-pressed={isFrom}
       disabled={!canEdit}
-      onPointerDown={drag.listeners?.onPointerDown as React.PointerEventHandler | undefined}
       onKeyDown={onKeyDown}
       onClick={() => tap(jack.id)}
       style={{ top: middle - height / 2, height }}
@@ -60,7 +51,7 @@ export const JackTag = memo(function JackTag({ jack, cardName, isPlugged, middle
         isPlugged ? "border-ink bg-floor font-semibold" : "border-line bg-floor",
         outcome ? "z-[1] max-w-full" : "max-w-[52%]",
         isFrom && "bg-mark text-mark-ink",
-        drop.isOver && isTarget && "outline-2 outline-offset-1 outline-ink",
+        isTarget && "data-[over]:outline-3 data-[over]:outline-offset-1 data-[over]:outline-ink",
         from !== null && !isTarget && !isFrom && "opacity-50",
       )}
     >

@@ -34,7 +34,7 @@ export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, e
       onKeyDown={(event) => {
         if (event.key === "Escape") onClose();
       }}
-      className="fixed inset-x-0 bottom-0 z-20 max-h-[60dvh] overflow-y-auto border-t-4 border-ink bg-bench px-4 py-4 md:px-6"
+      className="fixed inset-x-0 bottom-0 z-20 max-h-[48dvh] overflow-y-auto border-t-4 border-ink bg-bench px-4 py-4 md:px-6"
       data-print="hide"
     >
       <div className="mb-3 flex flex-wrap items-start justify-between gap-3">

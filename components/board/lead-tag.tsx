@@ -1,5 +1,4 @@
 "use client";
-import { useDraggable } from "@dnd-kit/core";
 import clsx from "clsx";
 import { memo } from "react";
 import { formatRange } from "@/lib/core/units/format-quantity";
@@ -7,7 +6,6 @@ import type { Tag } from "@/lib/core/chart";
 import type { LeadCheck } from "@/lib/core/electrics/patch-types";
 import type { Lead } from "@/lib/schemas/patch";
 import { VERDICT_TONE } from "../chart/verdict-tone";
-import type { DragData } from "./drag-data";
 
 interface LeadTagProps {
   tag: Tag;
@@ -25,8 +23,6 @@ interface LeadTagProps {
 /** A lead's tag at one of its ends; at the input it says number, volts and verdict. Dragged off, it unplugs. */
 export const LeadTag = memo(function LeadTag({ tag, leads, check, label, isDim, isPicked, canEdit, onPick, onUnplug }: LeadTagProps) {
   const first = leads[0];
-  const data: DragData = { type: "lead", leadId: first?.id ?? "" };
-  const drag = useDraggable({ id: `tag:${tag.end}:${tag.jackId}`, data, disabled: !canEdit || tag.end === "out" || leads.length !== 1 });
   if (!first) return null;
   const numbers = leads.map((lead) => lead.number).join("+");
   const volts = check?.highV ? formatRange(check.highV, "V") : null;
@@ -34,11 +30,10 @@ export const LeadTag = memo(function LeadTag({ tag, leads, check, label, isDim, 
   const words = isIn && check ? `, ${volts ? `${volts} when struck, ` : ""}${check.verdict}` : "";
   return (
     <button
-      ref={drag.setNodeRef}
       type="button"
-      data-lead-tag={isIn ? first.id : undefined}
+      data-lead-tag={isIn && leads.length === 1 ? first.id : undefined}
+      data-picked={isPicked || undefined}
       aria-label={`Lead ${numbers}, ${label}${words}`}
-      onPointerDown={drag.listeners?.onPointerDown as React.PointerEventHandler | undefined}
       onClick={() => onPick(first.id)}
       onKeyDown={(event) => {
         if (canEdit && (event.key === "Delete" || event.key === "Backspace")) {
@@ -47,7 +42,7 @@ export const LeadTag = memo(function LeadTag({ tag, leads, check, label, isDim, 
         }
       }}
       style={{ left: tag.x, top: tag.y, width: tag.width, height: tag.height }}
-      className={clsx("absolute flex touch-none items-center", isIn ? "justify-end pr-3" : "justify-start pl-2", isDim && "opacity-65", drag.isDragging && "opacity-40")}
+      className={clsx("absolute flex scroll-mt-8 scroll-mb-[50dvh] touch-none items-center", isIn ? "justify-end pr-3" : "justify-start pl-2", isDim && "opacity-65")}
     >
       <span className={clsx("flex h-full items-center gap-1 border bg-raised px-1 font-tape text-[1.12em] leading-none font-bold whitespace-nowrap", isPicked ? "border-ink bg-mark text-mark-ink" : "border-line text-ink")}>
         <span>{numbers}</span>

@@ -58,7 +58,7 @@ test("a newcomer makes gear from figures, patches it by drag and by keyboard, me
   await panel.getByRole("button", { name: "Use this fix" }).first().click();
   await expect(tag).toContainText("good");
   await saved(page);
-  const volts = (await tag.textContent())?.match(/[\d.]+–[\d.]+/)?.[0];
+  const volts = (await tag.locator(".font-semibold").textContent())?.match(/[\d.]+–[\d.]+/)?.[0];
   expect(volts).toBeDefined();
 
   // Undo takes the fix away again, redo brings it back.
