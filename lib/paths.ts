@@ -21,7 +21,8 @@ export const paths = {
   savedGear: (rigId: string, gearId: string, revision: number) => `${rigPath(rigId)}/gear/${enc(gearId)}?saved=${revision}`,
   songs: (rigId: string) => `${rigPath(rigId)}/songs`,
   board: (rigId: string, songId: string) => `${rigPath(rigId)}/songs/${enc(songId)}`,
-  sheet: (rigId: string, songId: string) => `${rigPath(rigId)}/songs/${enc(songId)}/sheet`,
+  sheet: (rigId: string, songId: string, paper: "a4" | "letter" = "a4") =>
+    `${rigPath(rigId)}/songs/${enc(songId)}/sheet${paper === "letter" ? "?paper=letter" : ""}`,
   set: (rigId: string, setId: string) => `${rigPath(rigId)}/sets/${enc(setId)}`,
   people: (rigId: string) => `${rigPath(rigId)}/people`,
   api: {

@@ -1,7 +1,7 @@
 import "server-only";
-import type { SheetSource } from "@/lib/paper/build-sheet-view";
-import { Rig, SetEntry, SetListRow, SongRow } from "@/models";
 import { AppError } from "@/lib/errors";
+import type { SheetSource } from "@/lib/paper/build-sheet-view";
+import { Rig, SetEntry, SetListRow, type SongRow } from "@/models";
 import type { Actor } from "./actor";
 import { checkGearPatch } from "./check-gear-patch";
 import { findAllGear } from "./find-gear";

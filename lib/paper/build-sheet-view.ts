@@ -3,6 +3,7 @@ import { severityOf } from "@/lib/core/electrics/judge/order-verdicts";
 import type { Verdict } from "@/lib/core/electrics/jacks";
 import type { PatchCheck } from "@/lib/core/electrics/patch-types";
 import { formatRange } from "@/lib/core/units/format-quantity";
+import type { Range } from "@/lib/core/units/spread";
 import type { Gear, GearKind } from "@/lib/schemas/gear";
 import type { Lead, Patch } from "@/lib/schemas/patch";
 import type { Song } from "@/lib/schemas/song";
@@ -83,16 +84,24 @@ function leadView(lead: Lead, check: PatchCheck, names: Names): LeadView {
     from: names.end(lead.outputId),
     to: names.end(lead.inputId),
     inline: lead.inline ? sayInline(lead.inline) : null,
-    restVolts: outcome?.lowV ? formatRange(outcome.lowV, "V") : null,
-    struckVolts: outcome?.highV ? formatRange(outcome.highV, "V") : null,
+    restVolts: outcome?.lowV ? sayVolts(outcome.lowV) : null,
+    struckVolts: outcome?.highV ? sayVolts(outcome.highV) : null,
     noVolts: names.isSensor(lead.outputId) ? "bare contact" : "not known",
     pulse: outcome?.pulseS ? formatRange(outcome.pulseS, "s") : null,
     verdict,
     isAssumed: (outcome?.assumed.length ?? 0) > 0,
     isDanger: DANGERS.includes(verdict),
     reason: outcome?.reasons[0]?.text ?? null,
-    fix: outcome?.fixes[0]?.text ?? outcome?.fixNote ?? null,
+    remedy: outcome?.fixes[0] ? `Way out: ${outcome.fixes[0].text}` : outcome?.fixNote ?? null,
   };
+}
+
+/** Below half a millivolt nobody at the rig can tell a level from 0 V. */
+const LEAST_V = 0.0005;
+
+function sayVolts({ min, max }: Range): string {
+  const plain = (volts: number) => (Math.abs(volts) < LEAST_V ? 0 : volts);
+  return formatRange({ min: plain(min), max: plain(max) }, "V");
 }
 
 /** Only what is plugged in this song: its cards, and on them the jacks in use. Cards stand as on the board. */

@@ -20,25 +20,34 @@ export interface PaperChart {
   scale: number;
 }
 
-export const TAG_SIZE = 15;
-const TAG_HEIGHT = 17;
-const LEAST_CARD = 74;
+/** Lead numbers, pt: not below 14. */
+export const TAG_SIZE = 14;
+/** Free on either side of a number in its tag, and between the tag and its card. */
+export const TAG_PAD = 2.5;
+export const TAG_GAP = { out: 3.5, in: 6.5 } as const;
+const TAG_HEIGHT = 16;
+const MOST_TAG = 31;
+const LEAST_CARD = 62;
 const MOST_CARD = 128;
 const NAME_LINES = 3;
 const LEAST_NAME = 10;
 const LEAST_ON_ONE_LINE = 13;
 
-/** The chart, in as few parts as pages of this size hold; cards joined by leads are never parted. */
-export function chartPages(view: ChartView, look: ChartLook, size: { width: number; height: number }): PaperChart[] {
-  const whole = layOut(view, look, size);
-  if (whole.scale === 1) return [whole];
-  const groups = joinedGroups(view);
-  if (groups.length <= 1) return [whole];
+/**
+ * The chart, in as few parts as pages of this size hold; cards joined by leads are never parted.
+ * @param size `firstHeight` is what the first page has left; a part too high for it is given a whole page.
+ */
+export function chartPages(view: ChartView, look: ChartLook, size: { width: number; height: number; firstHeight: number }): PaperChart[] {
+  const atFirst = { width: size.width, height: size.firstHeight };
+  const whole = layOut(view, look, atFirst);
+  const groups = whole.scale === 1 ? [] : joinedGroups(view);
+  if (groups.length <= 1) return [whole.scale === 1 ? whole : layOut(view, look, size)];
   const charts: PaperChart[] = [];
   let held: ChartView | null = null;
+  const room = () => (charts.length === 0 ? atFirst : size);
   for (const group of groups) {
     const both: ChartView = held === null ? group : pick(view, new Set([...held.cards, ...group.cards].map((card) => card.id)));
-    if (held !== null && layOut(both, look, size).scale < 1) {
+    if (held !== null && layOut(both, look, room()).scale < 1) {
       charts.push(layOut(held, look, size));
       held = group;
     } else held = both;
@@ -81,7 +90,7 @@ function fitNames(view: ChartView, look: ChartLook, width: number): Map<string, 
 export function tagText(view: ChartView, leadIds: readonly string[]): string {
   const numbers = leadIds.map((id) => view.leads.find((lead) => lead.id === id)?.number ?? 0).sort((a, b) => a - b);
   const text = numbers.join("+");
-  return measure("tape", TAG_SIZE, text) <= 44 ? text : `${numbers[0]}+${numbers.length - 1} more`;
+  return measure("tape", TAG_SIZE, text) <= MOST_TAG ? text : `${numbers.length} leads`;
 }
 
 function tagWidths(view: ChartView): { outTagWidth: number; inTagWidth: number } {
@@ -90,7 +99,8 @@ function tagWidths(view: ChartView): { outTagWidth: number; inTagWidth: number }
     for (const lead of view.leads) groups.set(lead[end], [...(groups.get(lead[end]) ?? []), lead.id]);
     return Math.max(0, ...[...groups.values()].map((ids) => measure("tape", TAG_SIZE, tagText(view, ids))));
   };
-  return { outTagWidth: widest("from") + 13, inTagWidth: widest("to") + 15 };
+  const around = 2 * TAG_PAD + 1.5;
+  return { outTagWidth: widest("from") + around + TAG_GAP.out, inTagWidth: widest("to") + around + TAG_GAP.in };
 }
 
 /** Cards that are joined by leads, directly or through others, in the order of their first card. */

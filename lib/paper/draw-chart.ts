@@ -1,7 +1,7 @@
 import type { Tag } from "@/lib/core/chart";
 import { severityOf } from "@/lib/core/electrics/judge/order-verdicts";
 import type { PaperChart } from "./chart-pages";
-import { TAG_SIZE, tagText } from "./chart-pages";
+import { TAG_GAP, TAG_PAD, TAG_SIZE, tagText } from "./chart-pages";
 import { drawTape } from "./draw-tape";
 import { drawVerdictLine } from "./draw-verdict-line";
 import type { Block } from "./flow-blocks";
@@ -14,17 +14,20 @@ const LANE_NAMES = ["Pads", "Conditioning", "Voices", "Desk"] as const;
 const LANE_HEAD = 19;
 const JACK_SIZE = 10;
 const NOTE_SIZE = 10;
+const GAP = 8;
 
 /** Room a chart takes besides its drawing. */
-export const CHART_EXTRA = LANE_HEAD + 4;
+export const CHART_EXTRA = GAP + LANE_HEAD + 4;
+/** And more where it has to be drawn small. */
+export const CHART_NOTE = NOTE_SIZE * 1.2;
 
 /** The run chart as one block, centred. */
 export function chartBlock(chart: PaperChart): Block {
   const note = chart.scale < 1 ? "Drawn small to fit the page: the lead table has every lead at full size." : null;
   const drawn = chart.layout.height * chart.scale;
   return {
-    height: CHART_EXTRA + drawn + (note ? NOTE_SIZE * 1.2 : 0),
-    before: 8,
+    height: CHART_EXTRA - GAP + drawn + (note ? CHART_NOTE : 0),
+    before: GAP,
     draw: (pen, { x, top, width }) => {
       const left = x + (width - chart.layout.width * chart.scale) / 2;
       const place = placeAt(left, top + LANE_HEAD, chart.scale);
@@ -32,7 +35,7 @@ export function chartBlock(chart: PaperChart): Block {
       drawTracks(pen, chart, place);
       for (const card of chart.layout.cards) drawCard(pen, chart, card.id, place);
       for (const tag of chart.layout.tags) drawTag(pen, chart, tag, place);
-      if (note) pen.line(clipText("text", NOTE_SIZE, note, width), { x, top: top + LANE_HEAD + drawn + 2, within: { x, y: top, width, height: 1e3 } });
+      if (note) pen.line(clipText("text", NOTE_SIZE, note, width), { x, top: top + LANE_HEAD + drawn + 3, within: { x, y: top + LANE_HEAD + drawn, width, height: CHART_NOTE + 4 } });
     },
   };
 }
@@ -105,9 +108,9 @@ function drawTag(pen: Pen, { view }: PaperChart, tag: Tag, place: Place): void {
   const text = tagText(view, tag.leadIds);
   const isDanger = view.leads.some((lead) => lead.isDanger && tag.leadIds.includes(lead.id));
   const size = TAG_SIZE * place.scale;
-  const wide = measure("tape", size, text) + 6 * place.scale;
+  const wide = measure("tape", size, text) + 2 * TAG_PAD * place.scale;
   const area = place.box(tag);
-  const x = tag.end === "out" ? area.x + 4 * place.scale : area.x + area.width - wide - 7 * place.scale;
+  const x = tag.end === "out" ? area.x + TAG_GAP.out * place.scale : area.x + area.width - wide - TAG_GAP.in * place.scale;
   const box = { x, y: area.y, width: wide, height: area.height };
   pen.box(box, { fill: isDanger ? "black" : "white", stroke: "black", width: 0.8 });
   pen.word("tape", size, text, { x, top: box.y + (box.height - size * 1.2) / 2, width: wide, align: "centre", within: box, ink: isDanger ? "white" : "black" });

@@ -1,5 +1,5 @@
 import type { Block } from "./flow-blocks";
-import { measure } from "./fonts";
+import { clipText } from "./wrap-text";
 
 const SIZE = 16;
 
@@ -10,9 +10,9 @@ export function headingBlock(text: string, before: number): Block {
     before,
     keepsWithNext: true,
     draw: (pen, { x, top, width }) => {
-      const wide = measure("tape", SIZE, text);
-      pen.word("tape", SIZE, text, { x, top, within: { x, y: top, width, height: 22 } });
-      pen.rule(x + wide + 8, top + 11, Math.max(0, width - wide - 8), 1.2);
+      const line = clipText("tape", SIZE, text, width - 16);
+      pen.line(line, { x, top, within: { x, y: top, width, height: 22 } });
+      pen.rule(x + line.width + 8, top + 11, width - line.width - 8, 1.2);
     },
   };
 }

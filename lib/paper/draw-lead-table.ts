@@ -5,7 +5,7 @@ import type { Pen } from "./pen";
 import type { LeadView } from "./sheet-view";
 import { measure } from "./fonts";
 import { endSpans } from "./end-spans";
-import { wrapSpans, wrapText, type Line } from "./wrap-text";
+import { fitText, wrapSpans, wrapText, type Line } from "./wrap-text";
 
 const NUMBER_SIZE = 17;
 const BODY = 10;
@@ -65,7 +65,7 @@ function rowBlock(lead: LeadView, width: number, rowHeight: number, head: Block)
     { column: from, lines: wrapSpans(endSpans(lead.from), from.width), indent: 0 },
     { column: to, lines: [...wrapSpans(endSpans(lead.to), to.width), ...(lead.inline ? wrapText("bold", BODY, lead.inline, to.width) : [])], indent: 0 },
     { column: expect, lines: expectLines(lead, expect.width), indent: 0 },
-    { column: verdict, lines: wrapText("bold", 10.5, lead.verdict + (lead.isAssumed ? "*" : ""), verdict.width - SAMPLE - 5), indent: SAMPLE + 5 },
+    { column: verdict, lines: fitText("bold", lead.verdict + (lead.isAssumed ? "*" : ""), { width: verdict.width - SAMPLE - 5, maxSize: 11, minSize: BODY, maxLines: 1, clips: false }).lines, indent: SAMPLE + 5 },
   ];
   const stop = lead.isDanger ? wrapText("bold", BODY, "DO NOT PLUG", verdict.width - 6) : [];
   const linesHeight = (lines: readonly Line[]) => lines.reduce((sum, line) => sum + line.size * 1.16, 0);

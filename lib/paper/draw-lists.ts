@@ -19,7 +19,7 @@ export function unsettledBlocks(view: SheetView, width: number, before: number):
   if (view.unsettled.length === 0 && view.nextMeasurement === null) return [];
   const rows = view.unsettled.map((lead) => numbered(String(lead.number), [
     { style: "bold", size: BODY, text: `${lead.verdict}:` },
-    { style: "text", size: BODY, text: `${lead.reason ?? ""}${lead.fix ? ` Way out: ${lead.fix}` : ""}` },
+    { style: "text", size: BODY, text: [lead.reason, lead.remedy].filter((part) => part !== null).join(" ") },
   ], width));
   const next = view.nextMeasurement === null ? [] : [lineRow([{ style: "bold", size: BODY, text: "Measure next:" }, { style: "text", size: BODY, text: view.nextMeasurement }], width)];
   return [headingBlock(view.unsettled.length === 0 ? "To measure" : `Not settled: ${view.unsettled.length} of ${view.leads.length} leads`, before), ...rows, ...next];
@@ -71,14 +71,15 @@ function drawDial(pen: Pen, centre: { x: number; y: number }, position: number):
 
 const TICK = 10;
 const STEP_COLUMNS = 2;
+const STEP_LEADING = 1.08;
 
 /** From the song before, as boxes to tick: pull what is listed, then plug it. */
 export function changeoverBlocks(view: SheetView, width: number, before: number): Block[] {
   const { changeover } = view;
   if (!changeover) return [];
-  const counts = [count(changeover.endMoves, "end"), ...(changeover.knobTurns > 0 ? [count(changeover.knobTurns, "knob")] : []), `about ${sayDuration(changeover.seconds)} at a typical pace`];
+  const counts = [count(changeover.endMoves, "end"), ...(changeover.knobTurns > 0 ? [count(changeover.knobTurns, "knob")] : []), `about ${sayDuration(changeover.seconds)} at typical pace`];
   const stays = changeover.stays.length === 0 ? "" : ` ${changeover.stays.length === 1 ? "Lead" : "Leads"} ${changeover.stays.join(", ")} ${changeover.stays.length === 1 ? "stays" : "stay"}.`;
-  const how = changeover.steps.length === 0 ? "Nothing moves." : "Desk down. Pull every end named below, inputs first; then plug, inputs last. Turn the knobs. Desk up.";
+  const how = changeover.steps.length === 0 ? "Nothing moves." : "Desk down; pull every end below, inputs first; plug, inputs last; knobs; desk up.";
   const intro = lineRow([{ style: "bold", size: BODY, text: `${counts.join(", ")}.` }, { style: "text", size: BODY, text: `${how}${stays}` }], width);
   const gap = 14;
   const column = (width - gap * (STEP_COLUMNS - 1)) / STEP_COLUMNS;
@@ -91,7 +92,7 @@ export function changeoverBlocks(view: SheetView, width: number, before: number)
   const perColumn = Math.ceil(cells.length / STEP_COLUMNS);
   for (let row = 0; row < perColumn; row += 1) {
     const pair = Array.from({ length: STEP_COLUMNS }, (_, index) => cells[row + index * perColumn]);
-    const height = Math.max(18, ...pair.map((cell) => (cell ? heightOf(cell.lines) + 5 : 0)));
+    const height = Math.max(18, ...pair.map((cell) => (cell ? cell.lines.reduce((sum, line) => sum + line.size * STEP_LEADING, 4) : 0)));
     rows.push({
       height,
       draw: (pen, { x, top }) => pair.forEach((cell, index) => {
@@ -100,8 +101,8 @@ export function changeoverBlocks(view: SheetView, width: number, before: number)
         pen.box({ x: left + 0.5, y: top + 3, width: TICK, height: TICK }, { stroke: "black", width: 1 });
         const within = { x: left, y: top, width: column, height };
         if (cell.step.number !== null) pen.word("tape", STEP, String(cell.step.number), { x: left + TICK + 6, top, within });
-        let at = top + 2;
-        for (const line of cell.lines) at += pen.line(line, { x: left + TICK + 6 + numberWidth, top: at, within, leading: LEADING });
+        let at = top + 1;
+        for (const line of cell.lines) at += pen.line(line, { x: left + TICK + 6 + numberWidth, top: at, within, leading: STEP_LEADING });
       }),
     });
   }

@@ -1,6 +1,7 @@
 import { readFileSync } from "node:fs";
 import { join } from "node:path";
 import fontkit, { type Font } from "@pdf-lib/fontkit";
+import { unpackWoff } from "./unpack-woff";
 
 /** What a piece of text is: running text, the same in bold, figures, a name on tape, a smaller name. */
 export type TextStyle = "text" | "bold" | "figures" | "tape" | "label";
@@ -36,7 +37,8 @@ const parsed = new WeakMap<Uint8Array, Font>();
 export function loadFont(file: string): LoadedFont {
   const known = loaded.get(file);
   if (known) return known;
-  const bytes = new Uint8Array(readFileSync(join(/* turbopackIgnore: true */ process.cwd(), "node_modules", file)));
+  const stored = new Uint8Array(readFileSync(join(/* turbopackIgnore: true */ process.cwd(), "node_modules", file)));
+  const bytes = file.endsWith(".woff") ? unpackWoff(stored) : stored;
   const made = { file, bytes, font: fontkit.create(bytes) as Font };
   loaded.set(file, made);
   parsed.set(bytes, made.font);

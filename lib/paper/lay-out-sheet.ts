@@ -1,5 +1,5 @@
 import { chartPages } from "./chart-pages";
-import { CHART_EXTRA, chartBlock, emptyChartBlock } from "./draw-chart";
+import { CHART_EXTRA, CHART_NOTE, chartBlock, emptyChartBlock } from "./draw-chart";
 import { dangerBlocks } from "./draw-dangers";
 import { headerBlock, noteBlocks } from "./draw-header";
 import { leadTableBlocks } from "./draw-lead-table";
@@ -15,7 +15,7 @@ import { clipText, wrapText } from "./wrap-text";
 const FOOT_HEIGHT = 20;
 const FOOT_SIZE = 10;
 
-/** How closely a sheet is set. The first that gets onto one page is taken, else the first that keeps chart and table together on one. */
+/** How closely a sheet is set. The first that gets onto one page is taken, else the first that keeps chart, table and knobs together on one. */
 interface Density {
   rowHeight: number;
   jackPitch: number;
@@ -43,7 +43,7 @@ export function layOutSheet(view: SheetView, size: PaperSize): Page[] {
 }
 
 interface SheetBlocks {
-  /** What is plugged where: it should stand on one page. */
+  /** What is plugged where and how the knobs stand: all on one page, if it can be. */
   patch: Block[];
   rest: Block[];
 }
@@ -55,16 +55,17 @@ function heightOf(blocks: readonly Block[]): number {
 function blocksOf(view: SheetView, density: Density, area: Box): SheetBlocks {
   const { width } = area;
   const head = [headerBlock(view, width), ...noteBlocks(view, width), ...dangerBlocks(view, width)];
-  const charts = chartPages(view.chart, density, { width, height: area.height - CHART_EXTRA - 14 });
+  const height = area.height - CHART_EXTRA - CHART_NOTE;
+  const charts = chartPages(view.chart, density, { width, height, firstHeight: Math.max(0, height - heightOf(head)) });
   return {
     patch: [
       ...head,
       ...(view.chart.cards.length === 0 ? [emptyChartBlock()] : charts.map(chartBlock)),
       ...leadTableBlocks(view.leads, width, { rowHeight: density.rowHeight, before: density.gap }),
       ...legendBlocks(view, width),
+      ...keepTogether(knobBlocks(view, width, density.gap), area.height / 3),
     ],
     rest: [
-      ...keepTogether(knobBlocks(view, width, density.gap), area.height / 3),
       ...keepTogether(unsettledBlocks(view, width, density.gap), area.height / 3),
       ...keepTogether(cautionBlocks(view, width, density.gap), area.height / 3),
       ...keepTogether(changeoverBlocks(view, width, density.gap), area.height),

@@ -18,8 +18,7 @@ export function listCautions(gear: readonly Gear[], patch: Patch, check: PatchCh
     ...phantomCautions(patch, jackOwner),
     ...unpoweredCautions(patch, check),
     ...supplyCautions(supplies),
-    { about: "Verdicts", text: "a verdict is as good as the figures typed in: measure before the gig." },
-    { about: "Hearing", text: "protect it, at rehearsal level too." },
+    { about: "Always", text: "verdicts are as good as the figures typed in: measure before the gig. Protect your hearing, at rehearsal too." },
   ];
 }
 

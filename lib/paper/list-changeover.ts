@@ -65,8 +65,8 @@ export function listChangeover(before: { title: string; patch: Patch }, patch: P
 const byNumber = (a: Lead, b: Lead) => a.number - b.number;
 
 function sayMove(was: Lead, lead: Lead, { jack }: Names): ChangeoverStep["parts"] {
-  const output = { lead: `${lead.colour}, output:`, ends: [jack(was.outputId), jack(lead.outputId)], text: "" };
-  const input = { lead: `${was.outputId === lead.outputId ? `${lead.colour}, ` : ""}input:`, ends: [jack(was.inputId), jack(lead.inputId)], text: "" };
+  const output = { lead: `${lead.colour}, out:`, ends: [jack(was.outputId), jack(lead.outputId)], text: "" };
+  const input = { lead: `${was.outputId === lead.outputId ? `${lead.colour}, ` : ""}in:`, ends: [jack(was.inputId), jack(lead.inputId)], text: "" };
   return [...(was.outputId === lead.outputId ? [] : [output]), ...(was.inputId === lead.inputId ? [] : [input])];
 }
 

@@ -27,9 +27,9 @@ export interface LeadView {
   /** The verdict leans on a figure nobody has measured. */
   isAssumed: boolean;
   isDanger: boolean;
-  /** The reason behind the verdict, and what to do about it. */
+  /** The reason behind the verdict, and what to do about it (or why nothing can be). */
   reason: string | null;
-  fix: string | null;
+  remedy: string | null;
 }
 
 export interface KnobView {

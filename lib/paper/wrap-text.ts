@@ -20,13 +20,6 @@ const ELLIPSIS = "…";
 export function wrapSpans(spans: readonly Span[], width: number): Line[] {
   const lines: Line[] = [];
   let line: Line = { spans: [], width: 0, size: 0 };
-  const push = (span: Span, wide: number) => {
-    const last = line.spans.at(-1);
-    if (last && last.style === span.style && last.size === span.size) last.text += span.text;
-    else line.spans.push({ ...span });
-    line.width += wide;
-    line.size = Math.max(line.size, span.size);
-  };
   const close = () => {
     if (line.spans.length > 0) lines.push(line);
     line = { spans: [], width: 0, size: 0 };
@@ -34,16 +27,33 @@ export function wrapSpans(spans: readonly Span[], width: number): Line[] {
   for (const { style, size, text } of spans) {
     for (const word of text.split(/\s+/u).filter((part) => part !== "")) {
       for (const piece of breakWord({ style, size, text: word }, width)) {
-        const wide = measure(style, size, piece);
-        const gap = line.spans.length === 0 ? 0 : measure(style, size, " ");
-        if (line.spans.length > 0 && line.width + gap + wide > width + 1e-6) close();
-        else if (gap > 0) push({ style, size, text: " " }, gap);
-        push({ style, size, text: piece }, wide);
+        const longer = append(line, { style, size, text: piece });
+        if (line.spans.length > 0 && longer.width > width + 1e-6) {
+          close();
+          line = append(line, { style, size, text: piece });
+        } else line = longer;
       }
     }
   }
   close();
   return lines;
+}
+
+/** A line with one more word. Its last span is measured anew: a space is as wide as the font of the word before it makes it. */
+function append(line: Line, word: Span): Line {
+  const last = line.spans.at(-1);
+  const size = Math.max(line.size, word.size);
+  if (!last) return { spans: [word], width: widthOf(word), size };
+  if (last.style === word.style && last.size === word.size) {
+    const joined = { ...last, text: `${last.text} ${word.text}` };
+    return { spans: [...line.spans.slice(0, -1), joined], width: line.width - widthOf(last) + widthOf(joined), size };
+  }
+  const spaced = { ...word, text: ` ${word.text}` };
+  return { spans: [...line.spans, spaced], width: line.width + widthOf(spaced), size };
+}
+
+function widthOf({ style, size, text }: Span): number {
+  return measure(style, size, text);
 }
 
 export function wrapText(style: TextStyle, size: number, text: string, width: number): Line[] {
