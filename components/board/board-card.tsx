@@ -29,20 +29,20 @@ interface BoardCardProps {
 /** A card: a strip of tape with its name over its jacks, inputs left, outputs right, knobs of this song in the foot. */
 export const BoardCard = memo(function BoardCard({ gear, box, jacks, plugged, knobs, isDim, isPicked, canEdit, tapeHeight, rowHeight, footHeight, onPick, onKnobs }: BoardCardProps) {
   const data: DragData = { type: "card", cardId: gear.id, lane: box.lane };
-  const sortable = useSortable({ id: gear.id, data, disabled: !canEdit });
+  const { attributes, listeners, setNodeRef, setActivatorNodeRef, transform, transition, isDragging } = useSortable({ id: gear.id, data, disabled: !canEdit });
   const at = new Map(jacks.map((jack) => [jack.id, jack]));
   return (
     <div
-      ref={sortable.setNodeRef}
+      ref={setNodeRef}
       data-card={gear.id}
-      style={{ left: box.x, top: box.y, width: box.width, height: box.height, transform: CSS.Translate.toString(sortable.transform), transition: sortable.transition }}
-      className={clsx("absolute bg-bench", !isPicked && "border-b-2 border-line-soft", isPicked && "outline-3 outline-mark", isDim && "opacity-65", sortable.isDragging && "opacity-40")}
+      style={{ left: box.x, top: box.y, width: box.width, height: box.height, transform: CSS.Translate.toString(transform), transition: transition }}
+      className={clsx("absolute bg-bench", !isPicked && "border-b-2 border-line-soft", isPicked && "outline-3 outline-mark", isDim && "opacity-65", isDragging && "opacity-40")}
     >
       <button
         type="button"
-        ref={sortable.setActivatorNodeRef}
-        {...sortable.attributes}
-        {...sortable.listeners}
+        ref={setActivatorNodeRef}
+        {...attributes}
+        {...listeners}
         aria-roledescription="card"
         aria-disabled={undefined}
         onClick={() => onPick(gear.id)}

@@ -76,7 +76,7 @@ export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, e
 function Figures({ check, input }: { check: LeadCheck; input: InputJack["input"] | undefined }) {
   const rows: [string, string][] = [];
   if (check.pulseS) rows.push(["Pulse it sees", formatRange(check.pulseS, "s")]);
-  if (input?.pulseMinS != null || input?.pulseMaxS != null) {
+  if (input && (input.pulseMinS !== null || input.pulseMaxS !== null)) {
     const min = input.pulseMinS === null ? null : `at least ${formatQuantity(input.pulseMinS, "s")}`;
     const max = input.pulseMaxS === null ? null : `at most ${formatQuantity(input.pulseMaxS, "s")}`;
     rows.push(["Pulse it wants", [min, max].filter(Boolean).join(", ")]);

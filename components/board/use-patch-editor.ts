@@ -93,11 +93,14 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   useEffect(() => {
     const draft = canEdit ? readPatchDraft(songId) : null;
     if (!draft) return;
-    if (same(draft.patch, initial.patch)) dropPatchDraft(songId);
-    else if (draft.baseRevision === initial.revision) {
-      dispatch({ type: "replace", patch: draft.patch });
-      setNews("Changes from your last visit had not been saved. They are back.");
-    } else takeIn(draft.base, draft.patch, initial);
+    const restoring = setTimeout(() => {
+      if (same(draft.patch, initial.patch)) dropPatchDraft(songId);
+      else if (draft.baseRevision === initial.revision) {
+        dispatch({ type: "replace", patch: draft.patch });
+        setNews("Changes from your last visit had not been saved. They are back.");
+      } else takeIn(draft.base, draft.patch, initial);
+    }, 0);
+    return () => clearTimeout(restoring);
     // Only once, with what the page was opened with.
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, []);

@@ -27,20 +27,20 @@ interface SetRowProps {
 }
 
 export function SetRow({ rigId, song, place, isLast, canEdit, onMove, onRemove }: SetRowProps) {
-  const sortable = useSortable({ id: song.id, disabled: !canEdit });
+  const { attributes, listeners, setNodeRef, setActivatorNodeRef, transform, transition, isDragging } = useSortable({ id: song.id, disabled: !canEdit });
   return (
     <li
-      ref={sortable.setNodeRef}
+      ref={setNodeRef}
       data-set-song={song.title}
-      style={{ transform: CSS.Translate.toString(sortable.transform), transition: sortable.transition }}
-      className={clsx("flex flex-wrap items-center gap-x-4 gap-y-2 bg-bench p-3", sortable.isDragging && "relative z-10 outline-3 outline-mark")}
+      style={{ transform: CSS.Translate.toString(transform), transition: transition }}
+      className={clsx("flex flex-wrap items-center gap-x-4 gap-y-2 bg-bench p-3", isDragging && "relative z-10 outline-3 outline-mark")}
     >
       <span className="w-8 font-mono text-xl font-bold">{place}</span>
       <button
         type="button"
-        ref={sortable.setActivatorNodeRef}
-        {...sortable.attributes}
-        {...sortable.listeners}
+        ref={setActivatorNodeRef}
+        {...attributes}
+        {...listeners}
         aria-disabled={undefined}
         aria-roledescription="song"
         aria-label={`${song.title}, place ${place}`}
