@@ -57,6 +57,10 @@ const WORDS: Record<string, string> = {
   offV: "the level at which it lets go", safeV: "what the input stands", safeLowV: "what the input stands", safeHighV: "what the input stands",
   loadOhm: "the load", pulseS: "the pulse's length", decayS: "the envelope's fall", limitA: "the most current it gives", signal: "what it gives",
   restOhm: "the resistance at rest", hitOhm: "the resistance when hit", riseS: "how fast the hit comes", holdS: "how long the hit lasts", fallS: "how fast it lets go",
+  farad: "the capacitance", peakV: "the peak of a firm hit", ohm: "the resistor", highDropV: "how far below its supply the comparator's output stays",
+  lowDropV: "how far above its lower rail the comparator's output stays", seriesOhm: "the output resistor", shuntOhm: "the resistor across the output",
+  topOhm: "the threshold's top resistor", potOhm: "the threshold pot", bottomOhm: "the threshold's bottom resistor", emitterOhm: "the emitter resistor",
+  supply: "its supply, fresh and near empty", biasV: "where the load returns to", clamp: "the protection diodes", maxDbu: "the strongest level it takes",
 };
 
 function describe(index: PatchIndex, key: FigureKey, leadIds: string[]): Measurement {
