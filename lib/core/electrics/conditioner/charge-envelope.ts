@@ -6,7 +6,7 @@ import { meets, PulseWatch } from "./pulse-watch";
 import { nextStep, Step, stepRosenbrock } from "./step-rosenbrock";
 import type { Stretch } from "./wanted-levels";
 
-const STEP_TOLERANCE = 2.5e-5;
+const STEP_TOLERANCE = 6e-5;
 const MOST_STEPS = 20_000;
 /** Time constants after which a fall that has not come to peak/e never will. */
 const LONGEST_FALL = 60;
@@ -47,7 +47,10 @@ export function chargeEnvelope(circuit: Circuit, at: OutputMoment, restsHigh: bo
     note();
     watch.see(timeS, at.outV >= halfV);
     let h = Math.min(untilS - timeS, 0.3 / -at.slope, (0.02 * highV) / (Math.abs(at.f) + 1e-9));
+    // Here the limit lets go and the rate bends: a step that ends just there is longer than one that finds it by trial.
+    const bendV = stretch.rate === 0 ? at.capacitorReaching(stretch.volt) : -Infinity;
     for (let i = 0; i < MOST_STEPS && timeS < untilS; i += 1) {
+      if (capacitorV < bendV && at.f > 0) h = Math.min(h, (bendV - capacitorV + tolerance) / at.f);
       if (h > 0.999 * (untilS - timeS)) h = untilS - timeS;
       const { f, slope, drift } = at;
       const { emitterV: emitterBefore, gain: gainBefore } = at.follower;

@@ -1,6 +1,6 @@
 import { preferredAbove } from "@/lib/core/units/e-series";
 import type { Finding } from "../conditioner-types";
-import { farads, isSound, ohms, percent, risingEdgeS, seconds, times, trySettled, type Scene } from "./scene";
+import { farads, isSound, ohms, percent, risingEdgeS, seconds, times, travel, trySettled, tryTurn, turnFor, volts, type Scene } from "./scene";
 
 /** Common practice for a trigger's length, no source (electrics §5). */
 const PRACTICE = { min: 1e-3, max: 5e-3 };
@@ -50,11 +50,20 @@ export function findDoubleTrigger(scene: Scene): Finding[] {
   if (solution.pulses.length < 2) return [];
   const starts = solution.pulses.slice(0, 4).map(({ startS }) => seconds(startS)).join(", ");
   const text = `One strike gives ${solution.pulses.length} pulses, at ${starts}${solution.pulses.length > 4 ? " …" : ""}.`;
+  const peakV = solution.shapedPeakV;
+  for (const share of [0.5, 0.65, 0.8]) {
+    const turn = turnFor(scene, share * peakV);
+    if (turn === null || turn <= scene.spec.threshold.turn) continue;
+    const higher = tryTurn(scene, turn);
+    if (isSound(higher.solution)) {
+      return [{ code: "double-trigger", text, fix: { text: `With the pot at ${travel(turn)} the threshold is ${volts(higher.circuit.thresholdV)}, over all but one of them: one pulse of ${seconds(higher.solution.pulses[0]?.widthS ?? 0)}.`, threshold: { turn } } }];
+    }
+  }
   for (const factor of [1.5, 2.2, 3.3, 4.7, 6.8, 10, 22, 47]) {
     const farad = preferredAbove(circuit.couplingF * factor * 0.99, "E6");
     const longer = trySettled(scene, { couplingF: farad });
     if (farad <= 1e-4 && isSound(longer)) {
-      return [{ code: "double-trigger", text, fix: { text: `${farads(farad)} as the coupling capacitor bridges them: one pulse of ${seconds(longer.pulses[0]?.widthS ?? 0)}.`, coupling: { farad } } }];
+      return [{ code: "double-trigger", text, fix: { text: `${farads(farad)} as the coupling capacitor makes one pulse of it, ${seconds(longer.pulses[0]?.widthS ?? 0)} long.`, coupling: { farad } } }];
     }
   }
   return [{ code: "double-trigger", text }];

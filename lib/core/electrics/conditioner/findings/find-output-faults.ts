@@ -1,6 +1,7 @@
 import { preferredBelow, preferredAbove } from "@/lib/core/units/e-series";
 import type { Finding } from "../conditioner-types";
 import { DIODE_A, DIODE_OHM, DiodeBranch } from "../junctions";
+import { solveCircuit } from "../solve-circuit";
 import { amperes, farads, isSound, ohms, percent, seconds, trySettled, volts, type Scene } from "./scene";
 
 const NEGATIVE_V = -0.1;
@@ -43,9 +44,9 @@ export function findUnderfilled(scene: Scene): Finding[] {
   for (let farad = preferredBelow(envelope.farad * 0.7, "E6"); farad >= envelope.farad / 1000 && farad > 1e-11; farad = preferredBelow(farad * 0.7, "E6")) {
     // The fall keeps its length where R grows as C shrinks.
     const ohm = preferredAbove((envelope.ohm * envelope.farad) / farad, "E12");
-    const tried = trySettled(scene, { envelope: { ...envelope, farad, ohm } });
-    if (isSound(tried) && tried.envelope && tried.envelope.peakV >= WELL_FILLED * fullV) {
-      return [{ code: "envelope-underfilled", text, fix: { text: `${farads(farad)} with ${ohms(ohm)} fills to ${volts(tried.envelope.peakV)} (${percent(tried.envelope.peakV / fullV)}) and falls in ${seconds(tried.envelope.decayS)}.`, envelope: { farad, ohm } } }];
+    const tried = solveCircuit({ ...circuit, envelope: { ...envelope, farad, ohm } }, true);
+    if (isSound(tried) && tried.envelope && tried.envelope.peakV >= WELL_FILLED * tried.envelope.fullV) {
+      return [{ code: "envelope-underfilled", text, fix: { text: `${farads(farad)} with ${ohms(ohm)} fills to ${volts(tried.envelope.peakV)} (${percent(tried.envelope.peakV / tried.envelope.fullV)}) and falls in ${seconds(tried.envelope.decayS)}.`, envelope: { farad, ohm } } }];
     }
   }
   return [{ code: "envelope-underfilled", text }];

@@ -67,9 +67,9 @@ export function findNoise(scene: Scene): Finding[] {
   const noiseV = spec.comparator.noiseV ?? 0;
   if (!(noiseV > 0) || solution.restsHigh || circuit.tripV >= NOISE_MARGIN * noiseV) return [];
   const text = `Noise of ${volts(noiseV)} stands beside a threshold of ${volts(circuit.tripV)}, ${times(circuit.tripV / noiseV)} as much: ${circuit.tripV <= noiseV ? "it fires by itself" : "a little more and it fires by itself"}.`;
-  const wanted = Math.max(NOISE_MARGIN * noiseV, MIDDLE * solution.shapedPeakV);
-  const turn = wanted < solution.shapedPeakV / 1.2 ? turnFor(scene, wanted) : null;
+  const least = 1.05 * NOISE_MARGIN * noiseV;
+  const turn = [Math.max(least, MIDDLE * solution.shapedPeakV), least].map((wanted) => turnFor(scene, wanted)).find((found) => found !== null) ?? null;
   const tried = turn === null ? null : tryTurn(scene, turn);
-  if (turn === null || !tried || !isSound(tried.solution)) return [{ code: "noise-near-threshold", text }];
+  if (turn === null || !tried || !isSound(tried.solution) || tried.circuit.tripV > 0.9 * solution.shapedPeakV) return [{ code: "noise-near-threshold", text }];
   return [{ code: "noise-near-threshold", text, fix: { text: `With the pot at ${travel(turn)} the threshold is ${volts(tried.circuit.thresholdV)}, ${times(tried.circuit.tripV / noiseV)} the noise, and this hit still fires.`, threshold: { turn } } }];
 }
