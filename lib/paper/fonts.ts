@@ -58,15 +58,16 @@ export interface FontRun {
 export function splitRuns(style: TextStyle, text: string): FontRun[] {
   const runs: FontRun[] = [];
   for (const letter of text.normalize("NFC")) {
-    if (/[\p{Cc}\p{Cf}\p{Cs}]/u.test(letter) || /[\uFE00-\uFE0F]/.test(letter)) continue;
+    if (isUnseen(letter)) continue;
     const last = runs.at(-1);
     // A space stays with the run before it, so that words of a script read the other way keep together.
     if (last && letter === " ") {
       last.text += letter;
       continue;
     }
-    const file = coveringFont(style, letter) ?? coveringFont(style, PLACEHOLDER) ?? (CHAINS[style][0] as string);
-    const shown = coveringFont(style, letter) ? letter : PLACEHOLDER;
+    const covered = coveringFont(style, letter);
+    const file = covered ?? coveringFont(style, PLACEHOLDER) ?? (CHAINS[style][0] as string);
+    const shown = covered ? letter : PLACEHOLDER;
     if (last?.file === file) last.text += shown;
     else runs.push({ file, text: shown });
   }
@@ -75,26 +76,33 @@ export function splitRuns(style: TextStyle, text: string): FontRun[] {
 
 /** Whether any letter of the text has to be replaced. */
 export function hasMissing(style: TextStyle, text: string): boolean {
-  return [...text.normalize("NFC")].some((letter) => !/[\p{Cc}\p{Cf}\p{Cs}\uFE00-\uFE0F]/u.test(letter) && coveringFont(style, letter) === null);
+  return [...text.normalize("NFC")].some((letter) => !isUnseen(letter) && coveringFont(style, letter) === null);
 }
 
-const covering = new Map<string, string | null>();
+/** Control and format characters, halves of surrogate pairs, variation selectors. */
+function isUnseen(letter: string): boolean {
+  return /[\p{Cc}\p{Cf}\p{Cs}\uFE00-\uFE0F]/u.test(letter);
+}
+
+const covering: Record<TextStyle, Map<string, string | null>> = { text: new Map(), bold: new Map(), figures: new Map(), tape: new Map(), label: new Map() };
 
 function coveringFont(style: TextStyle, letter: string): string | null {
-  const key = `${style}:${letter}`;
-  const known = covering.get(key);
+  const known = covering[style].get(letter);
   if (known !== undefined) return known;
   const code = letter.codePointAt(0) ?? 0;
   const found = CHAINS[style].find((file) => loadFont(file).font.hasGlyphForCodePoint(code)) ?? null;
-  if (covering.size > 20_000) covering.clear();
-  covering.set(key, found);
+  if (covering[style].size > MOST_CACHED) covering[style].clear();
+  covering[style].set(letter, found);
   return found;
 }
 
 /** Text is drawn without ligatures, so that a search in the file finds it letter by letter. */
 export const FONT_FEATURES = { liga: false, dlig: false, clig: false } as const;
 
+/** Caches are emptied when they hold so many entries, so that a long-lived process does not grow. */
+const MOST_CACHED = 20_000;
 const widths = new Map<string, number>();
+const measured: Record<TextStyle, Map<string, number>> = { text: new Map(), bold: new Map(), figures: new Map(), tape: new Map(), label: new Map() };
 
 /** Width of a run at 1 pt, as it will be drawn: the sum of its glyphs' advances. */
 export function runWidth({ file, text }: FontRun): number {
@@ -103,12 +111,17 @@ export function runWidth({ file, text }: FontRun): number {
   if (known !== undefined) return known;
   const { font } = loadFont(file);
   const width = font.layout(text, FONT_FEATURES).glyphs.reduce((sum, glyph) => sum + glyph.advanceWidth, 0) / font.unitsPerEm;
-  if (widths.size > 20_000) widths.clear();
+  if (widths.size > MOST_CACHED) widths.clear();
   widths.set(key, width);
   return width;
 }
 
 /** Width of text at a size, in the size's unit. */
 export function measure(style: TextStyle, size: number, text: string): number {
-  return splitRuns(style, text).reduce((sum, run) => sum + runWidth(run), 0) * size;
+  const known = measured[style].get(text);
+  if (known !== undefined) return known * size;
+  const width = splitRuns(style, text).reduce((sum, run) => sum + runWidth(run), 0);
+  if (measured[style].size > MOST_CACHED) measured[style].clear();
+  measured[style].set(text, width);
+  return width * size;
 }

@@ -57,8 +57,7 @@ describe.each(PAPER_SIZES)("the sheet read back on %s", (paper) => {
 
 describe("one page", () => {
   it.each(demoSongs.map((song) => song.id))("holds chart, lead table and knobs of a demo song on A4: %s", async (id) => {
-    const { before: _before, ...source } = demoSheet(id);
-    const view = buildSheetView({ ...source, before: null });
+    const view = buildSheetView({ ...demoSheet(id), before: null });
     const first = dense((await readPdf(await renderSheet(view, "a4"))).texts[0] ?? "");
     for (const { number, colour, to, verdict } of view.leads) {
       expect(first).toContain(`${number}${colour}`);

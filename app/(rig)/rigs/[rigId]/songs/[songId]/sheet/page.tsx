@@ -50,14 +50,14 @@ export default async function SheetPage({ params, searchParams }: Props) {
           ))}
         </nav>
       </div>
-      <div className="flex flex-col items-start gap-6 xl:flex-row print:block">
-        <section aria-labelledby="preview-heading" data-print="hide" className="hidden w-full max-w-[46rem] md:block xl:w-1/2">
+      <div className="grid items-start gap-6 xl:grid-cols-[minmax(0,2fr)_minmax(0,3fr)] print:block">
+        <section aria-labelledby="preview-heading" data-print="hide" className="hidden w-full max-w-[46rem] md:block">
           <h2 id="preview-heading" className="mb-2 text-lg font-bold">What the printer gets</h2>
           <object key={paper} data={pdf} type="application/pdf" aria-label={`The patch sheet of ${view.title} as a PDF`} className="h-[min(64rem,120vh)] w-full border border-line bg-raised">
             <p className="p-4">This browser shows no PDF inside a page. <a className="underline" href={pdf}>Open the PDF</a>, or read the same sheet on this page.</p>
           </object>
         </section>
-        <section aria-labelledby="screen-heading" className="w-full min-w-0 xl:w-1/2 print:w-full">
+        <section aria-labelledby="screen-heading" className="w-full min-w-0">
           <h2 id="screen-heading" data-print="hide" className="mb-2 text-lg font-bold">The same on this screen</h2>
           <SheetBody view={view} />
         </section>

@@ -14,7 +14,9 @@ export function SheetBody({ view }: { view: SheetView }) {
   return (
     <article className="flex max-w-[46rem] flex-col gap-4 bg-raised p-4 text-[0.95rem] md:p-6 print:max-w-none print:gap-3 print:p-0 print:text-[10pt]">
       <header className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2">
-        <Tape as="h3" size="large" className="print:border-2">{view.title}</Tape>
+        <div className="max-w-full drop-shadow-[0_0_1px_var(--ink)] print:drop-shadow-none">
+          <Tape as="h3" size="large" className="print:border-2 print:[clip-path:none]">{view.title}</Tape>
+        </div>
         <div className="text-right max-md:text-left">
           <p className="font-tape text-2xl font-bold leading-tight">{view.rigName}</p>
           {view.place ? <p>{view.place}</p> : null}
@@ -73,7 +75,7 @@ function Dangers({ leads }: { leads: readonly LeadView[] }) {
     <ul className="border-2 border-ink">
       {groupDangers(leads).map(([lead, ...others]) => (
         <li key={lead.id} className="flex border-b-2 border-ink last:border-b-0">
-          <strong className="flex shrink-0 items-center bg-ink px-2 text-bench print:[print-color-adjust:exact]">DO NOT PLUG</strong>
+          <strong className="flex w-20 shrink-0 items-center bg-ink px-2 sm:w-auto text-bench print:[print-color-adjust:exact]">DO NOT PLUG</strong>
           <span className="flex flex-wrap gap-x-2 p-2 sm:flex-nowrap">
             <span className="shrink-0 font-tape text-[1.6em] font-extrabold leading-none">{[lead, ...others].map((one) => one.number).join(" + ")}</span>
             <span><strong>{[lead, ...others].map((one) => sayEnd(one.from)).join(" and ")} to {sayEnd(lead.to)}: {lead.verdict}.</strong> {lead.reason} {lead.remedy}</span>

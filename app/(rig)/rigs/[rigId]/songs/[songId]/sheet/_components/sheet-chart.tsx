@@ -8,8 +8,9 @@ import type { ChartView } from "@/lib/paper/sheet-view";
 /** CSS pixels a point. */
 const PX = 96 / 72;
 /** The chart of the PDF at its own size; only its height is free here. */
-const LOOK = { jackPitch: 23, cardGap: 8, nameSize: 16 };
-const WIDTH_PT = 530;
+const LOOK = { jackPitch: 21, cardGap: 5, nameSize: 15 };
+/** What is left of A4 beside the printer's and the page's own margins. */
+const WIDTH_PT = 496;
 const LANE_NAMES = ["Pads", "Conditioning", "Voices", "Desk"] as const;
 
 export function SheetChart({ chart }: { chart: ChartView }) {
@@ -37,7 +38,7 @@ function ChartPart({ part }: { part: PaperChart }) {
           const tapeHeight = part.metrics.tapeHeight * unit;
           return (
             <div key={box.id} style={{ left: box.x, top: box.y, width: box.width, height: box.height }} className="absolute border border-line bg-bench">
-              <div style={{ height: tapeHeight }} className="tape flex flex-col items-center justify-center leading-none print:border print:border-ink">
+              <div style={{ height: tapeHeight }} className="tape flex flex-col items-center justify-center leading-none print:border print:border-ink print:[clip-path:none]">
                 {(names.get(box.id) ?? []).map((line, index) => <span key={index} style={{ fontSize: line.size * unit }} className="whitespace-nowrap">{line.spans.map((span) => span.text).join("")}</span>)}
               </div>
               {layout.jacks.filter((jack) => jack.cardId === box.id).map((jack) => (
