@@ -8,7 +8,7 @@ import type { Gear, GearKind } from "@/lib/schemas/gear";
 import type { Lead, Patch } from "@/lib/schemas/patch";
 import type { Song } from "@/lib/schemas/song";
 import { listCautions } from "./list-cautions";
-import { listChangeover } from "./list-changeover";
+import { listChangeover, type ChangeoverView } from "./list-changeover";
 import { sayInline } from "./say-inline";
 import type { ChartView, EndView, KnobView, LeadView, SheetView } from "./sheet-view";
 
@@ -52,9 +52,16 @@ export function buildSheetView(source: SheetSource): SheetView {
     unsettled: leads.filter((lead) => !lead.isDanger && !FINE.includes(lead.verdict)).sort((a, b) => severityOf(b.verdict) - severityOf(a.verdict) || a.number - b.number),
     nextMeasurement: check.nextMeasurement?.text ?? null,
     knobs: knobViews(gear, patch),
-    changeover: before && listChangeover(before, patch, { jack: names.end, knob: (gearId, knobId) => knobName(gear, gearId, knobId) }),
+    changeover: before && holdBack(listChangeover(before, patch, { jack: names.end, knob: (gearId, knobId) => knobName(gear, gearId, knobId) }), leads),
     cautions: listCautions(gear, patch, check),
   };
+}
+
+/** A step must not tell anybody to plug what the same page says not to. */
+function holdBack(changeover: ChangeoverView, leads: readonly LeadView[]): ChangeoverView {
+  const dangers = new Set(leads.filter((lead) => lead.isDanger).map((lead) => lead.number));
+  const steps = changeover.steps.map((step) => (step.number !== null && dangers.has(step.number) ? { ...step, parts: [...step.parts, { lead: "DO NOT PLUG: pull it and leave it out.", ends: [], text: "" }] } : step));
+  return { ...changeover, steps };
 }
 
 interface Names {

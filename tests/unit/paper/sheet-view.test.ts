@@ -17,6 +17,12 @@ describe("the view of a sheet", () => {
     expect(view.dangers.map((lead) => lead.number)).toEqual([2, 4, 8]);
   });
 
+  it("tells nobody in the changeover to plug a dangerous lead", () => {
+    const { changeover } = buildSheetView(demoSheet("ladder-month"));
+    const held = changeover?.steps.filter((step) => step.parts.some((part) => part.lead.startsWith("DO NOT PLUG")));
+    expect(held?.map((step) => step.number)).toEqual([2]);
+  });
+
   it("draws only the cards of this song, and on them the jacks in use", () => {
     const { chart } = buildSheetView(demoSheet("last-bus-north"));
     expect(chart.cards.map((card) => card.id)).not.toContain("cond-grey");
