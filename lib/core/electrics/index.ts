@@ -11,3 +11,7 @@ export { simulateConditioner } from "./conditioner/simulate-conditioner";
 export { simulateForPatch } from "./conditioner/simulate-for-patch";
 export { findConditionerIssues } from "./conditioner/find-conditioner-issues";
 export type { ConditionerResult, ConditionerSpec, Finding, FindingCode, Pulse, Trace } from "./conditioner/conditioner-types";
+export { contactStrike, type Contact } from "./conditioner/contact-strike";
+export { oneShotS } from "./piezo/one-shot";
+export { simulatePiezo } from "./piezo/simulate-piezo";
+export type { PiezoResult, PiezoSpec } from "./piezo/piezo-types";
