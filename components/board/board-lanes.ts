@@ -1,15 +1,9 @@
-import type { ChartCard, LaneIndex } from "@/lib/core/chart";
-import type { Gear, GearKind } from "@/lib/schemas/gear";
+import type { ChartCard } from "@/lib/core/chart";
+import type { Gear } from "@/lib/schemas/gear";
+import { laneOf } from "@/lib/schemas/lane-of";
 import type { Patch } from "@/lib/schemas/patch";
 
 export const LANE_NAMES = ["Pads", "Conditioning", "Voices", "Desk"] as const;
-
-const LANE_OF: Partial<Record<GearKind, LaneIndex>> = { pad: 0, conditioner: 1, shaper: 1, voice: 2, "desk-channel": 3 };
-
-/** The lane a piece of gear stands in; supplies stand in none. */
-export function laneOf(kind: GearKind): LaneIndex | null {
-  return LANE_OF[kind] ?? null;
-}
 
 /** Gear that stands on the board, lane by lane, in this song's order; gear the song does not name follows in the rig's order. */
 export function orderCards(gear: readonly Gear[], lanes: Patch["lanes"]): Gear[] {

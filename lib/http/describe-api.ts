@@ -24,6 +24,8 @@ export interface Operation {
   ok: 200 | 201 | 204;
   /** Media type of a good answer; JSON unless stated. */
   type?: string;
+  /** Optional query parameters and what they may be. */
+  query?: Record<string, readonly string[]>;
   /** Refusals beyond 400, 401 and 404. */
   refusals?: number[];
 }
@@ -60,7 +62,7 @@ export const OPERATIONS: readonly Operation[] = [
   { method: "get", path: `${song}/patch`, summary: "A song's patch with the check of every lead", right: "seeRig", ok: 200 },
   { method: "put", path: `${song}/patch`, summary: "Save a song's patch", right: "editPatch", body: patchSaveSchema, ok: 200, refusals: [409, 422] },
   { method: "post", path: `${song}/check`, summary: "Check a draft patch without saving it", right: "seeRig", body: patchCheckSchema, ok: 200 },
-  { method: "get", path: `${song}/sheet.pdf`, summary: "The patch sheet of a song", right: "print", ok: 200, type: "application/pdf" },
+  { method: "get", path: `${song}/sheet.pdf`, summary: "The patch sheet of a song", right: "print", ok: 200, type: "application/pdf", query: { paper: ["a4", "letter"] }, refusals: [400] },
   { method: "get", path: `${rig}/sets`, summary: "The set lists of a rig", right: "seeRig", ok: 200 },
   { method: "post", path: `${rig}/sets`, summary: "Add a set list", right: "editSets", body: setCreateSchema, ok: 201 },
   { method: "get", path: `${rig}/sets/{setId}`, summary: "One set list", right: "seeRig", ok: 200 },
@@ -118,7 +120,7 @@ export function describeApi(serverUrl: string): Record<string, unknown> {
 }
 
 function describe(operation: Operation, schemaOf: (schema: z.ZodType) => unknown, problem: unknown): Record<string, unknown> {
-  const { method, path, summary, right, body, ok, type = "application/json", refusals = [] } = operation;
+  const { method, path, summary, right, body, ok, type = "application/json", query = {}, refusals = [] } = operation;
   const names = [...path.matchAll(/\{(\w+)\}/g)].map((match) => match[1] ?? "");
   const isOpen = right === "open";
   const codes = new Set([...(body ? [400] : []), ...(isOpen ? [] : [401]), ...(names.length > 0 ? [403, 404] : []), ...refusals]);
@@ -127,7 +129,14 @@ function describe(operation: Operation, schemaOf: (schema: z.ZodType) => unknown
     operationId: `${method}${path.replace("/api/v1", "").replace(/[^A-Za-z0-9]+(\w?)/g, (_all, next: string) => next.toUpperCase())}`,
     summary,
     description: isOpen ? "Open to anyone." : right === "account" ? "For anyone signed in." : `Asks for the right “${right}” in the rig.`,
-    ...(names.length > 0 ? { parameters: names.map((name) => ({ name, in: "path", required: true, schema: { type: "string", maxLength: 64 } })) } : {}),
+    ...(names.length > 0
+      ? {
+          parameters: [
+            ...names.map((name) => ({ name, in: "path", required: true, schema: { type: "string", maxLength: 64 } })),
+            ...Object.entries(query).map(([name, values]) => ({ name, in: "query", required: false, schema: { type: "string", enum: values } })),
+          ],
+        }
+      : {}),
     ...(body ? { requestBody: { required: true, content: { "application/json": { schema: schemaOf(body) } } } } : {}),
     responses: {
       [String(ok)]: ok === 204 ? { description: "Done" } : { description: "Done", content: { [type]: { schema: type === "application/json" ? { type: "object" } : { type: "string", format: "binary" } } } },

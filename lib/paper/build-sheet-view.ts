@@ -1,10 +1,11 @@
-import { clockText, type LaneIndex } from "@/lib/core/chart";
+import { clockText } from "@/lib/core/chart";
 import { severityOf } from "@/lib/core/electrics/judge/order-verdicts";
 import type { Verdict } from "@/lib/core/electrics/jacks";
 import type { PatchCheck } from "@/lib/core/electrics/patch-types";
 import { formatRange } from "@/lib/core/units/format-quantity";
 import type { Range } from "@/lib/core/units/spread";
-import type { Gear, GearKind } from "@/lib/schemas/gear";
+import { laneOf } from "@/lib/schemas/lane-of";
+import type { Gear } from "@/lib/schemas/gear";
 import type { Lead, Patch } from "@/lib/schemas/patch";
 import type { Song } from "@/lib/schemas/song";
 import { listCautions } from "./list-cautions";
@@ -31,8 +32,6 @@ export interface SheetSource {
 const FINE: readonly Verdict[] = ["good", "tight"];
 /** Verdicts under which something may be damaged as soon as the lead is in. */
 const DANGERS: readonly Verdict[] = ["hot", "clash", "overload"];
-const LANE_OF: Partial<Record<GearKind, LaneIndex>> = { pad: 0, conditioner: 1, shaper: 1, voice: 2, "desk-channel": 3 };
-
 /** A song's patch as its sheet says it. */
 export function buildSheetView(source: SheetSource): SheetView {
   const { song, gear, patch, check, place, before } = source;
@@ -118,9 +117,9 @@ function chartView(gear: readonly Gear[], patch: Patch, leads: readonly LeadView
   const views = new Map(leads.map((lead) => [lead.id, lead]));
   const cards = gear
     .flatMap((item, index) => {
-      const lane = LANE_OF[item.kind];
+      const lane = laneOf(item.kind);
       const jacks = item.jacks.filter((jack) => used.has(jack.id));
-      return lane === undefined || jacks.length === 0 ? [] : [{ item, jacks, lane, index, rank: rank.get(item.id) ?? Infinity }];
+      return lane === null || jacks.length === 0 ? [] : [{ item, jacks, lane, index, rank: rank.get(item.id) ?? Infinity }];
     })
     .sort((a, b) => a.lane - b.lane || (a.rank === b.rank ? a.index - b.index : a.rank - b.rank))
     .map(({ item, jacks, lane }) => ({

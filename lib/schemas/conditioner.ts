@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { findConditionerIssues } from "@/lib/core/electrics/conditioner/find-conditioner-issues";
 import { figure, spread } from "./figures";
 
 const positiveOhm = () => spread("Ohm", { openMin: true });
@@ -61,6 +62,9 @@ export const conditionerRequestSchema = z
       .nullable()
       .default(null),
     load: z.strictObject({ ohm: positiveOhm().nullable() }).default({ ohm: null }),
+  })
+  .superRefine((request, ctx) => {
+    for (const { path, message } of findConditionerIssues(request)) ctx.addIssue({ code: "custom", path, message });
   })
   .meta({ id: "ConditionerRequest", description: "A pad, a trigger conditioner and its load." });
 export type ConditionerRequest = z.infer<typeof conditionerRequestSchema>;

@@ -6,10 +6,8 @@ import { idSchema, nameSchema } from "./identity";
 export const signalSchema = z.enum(SIGNALS as unknown as ["sensor", "trigger", "gate", "envelope", "control", "audio"]);
 export const polaritySchema = z.enum(["rising", "falling"]);
 
-/** A volt range with both ends. */
-const voltRange = z
-  .strictObject({ min: figure("V"), max: figure("V") })
-  .refine((range) => range.min <= range.max, { error: "The lower limit comes first: min is above max." });
+/** A volt range with both ends; whether they are the right way round is asked once, for the whole connection. */
+const voltRange = z.strictObject({ min: figure("V"), max: figure("V") });
 
 /** An output as the open calculator takes it (every driving figure stated). */
 export const outputSchema = z
