@@ -19,7 +19,7 @@ export const EASES: readonly Ease[] = [
 ];
 
 /** For a circuit on which solver and simulator differ: the simulator again, an order finer, decides. */
-export const FINE: Ease = { steep: 2e5, outFarad: 1e-9, method: "gear", finer: 20 };
+export const FINE: Ease = { steep: 2e5, outFarad: 1e-10, method: "gear", finer: 20 };
 
 /** Time constant of the decision where it must remember itself (hysteresis), s. */
 const MEMORY_S = 2e-7;

@@ -7,7 +7,7 @@ import { conditionerDeck, EASES, FINE, type Ease } from "./conditioner-deck";
 import { readingsOf, type Readings } from "./conditioner-readings";
 import { Ngspice } from "./ngspice";
 
-const COUNT = 330;
+const COUNT = 360;
 
 /** The accuracy of electrics §3, figure by figure: the larger of a share of the simulator's value and an absolute amount. */
 const TOLERANCES = {

@@ -160,12 +160,19 @@ export function solveShaper(circuit: Circuit, restsHigh: boolean, whole: boolean
       const next = h === until - t ? until : t + h;
       const s1 = at.shapedV;
       const d1 = at.shapedRate;
-      if (q0 * at.padRate < 0) {
-        const turned = hermite(p0, q0, at.padV, at.padRate, h, turnOf(p0, q0, at.padV, at.padRate, h));
-        if (turned > padMostV) padMostV = turned;
-        if (turned < padLeastV) padLeastV = turned;
-      }
       const end = step.y;
+      if (q0 * at.padRate < 0) {
+        // The pad's level turns inside: one step to about there, and a cubic over what is left of the doubt.
+        const [p1, q1] = [at.padV, at.padRate];
+        const rough = turnOf(p0, q0, p1, q1, h) * h;
+        stepRosenbrock(at, t, capacitorV, rough, f, slope, drift, step);
+        at.look(t + rough, step.y);
+        const [pm, qm] = [at.padV, at.padRate];
+        const turned = q0 * qm < 0 ? hermite(p0, q0, pm, qm, rough, turnOf(p0, q0, pm, qm, rough)) : hermite(pm, qm, p1, q1, h - rough, turnOf(pm, qm, p1, q1, h - rough));
+        padMostV = Math.max(padMostV, pm, q0 > 0 ? turned : pm);
+        padLeastV = Math.min(padLeastV, pm, q0 < 0 ? turned : pm);
+        at.look(next, end);
+      }
       if (isHigh ? s1 < releaseV : s1 > tripV) {
         const level = isHigh ? releaseV : tripV;
         const rough = meetingOf(s0, d0, s1, d1, h, level) * h;
