@@ -48,9 +48,9 @@ export const JackTag = memo(function JackTag({ jack, cardName, isPlugged, middle
       className={clsx(
         "absolute flex touch-none items-center gap-1 px-1.5 text-[0.86em] leading-none whitespace-nowrap disabled:opacity-100",
         side === "in" ? "left-0 border-l-4 text-left" : "right-0 border-r-4 flex-row-reverse text-right",
-        isPlugged ? "border-ink bg-floor font-semibold" : "border-line bg-floor",
+        isPlugged ? "border-ink font-semibold" : "border-line",
         outcome ? "z-[1] max-w-full" : "max-w-[52%]",
-        isFrom && "bg-mark text-mark-ink",
+        isFrom ? "bg-mark text-mark-ink" : "bg-floor",
         isTarget && "data-[over]:outline-3 data-[over]:outline-offset-1 data-[over]:outline-ink",
         from !== null && !isTarget && !isFrom && "opacity-50",
       )}

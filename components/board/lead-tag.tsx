@@ -44,7 +44,7 @@ export const LeadTag = memo(function LeadTag({ tag, leads, check, label, isDim, 
       style={{ left: tag.x, top: tag.y, width: tag.width, height: tag.height }}
       className={clsx("absolute flex scroll-mt-8 scroll-mb-[50dvh] touch-none items-center", isIn ? "justify-end pr-3" : "justify-start pl-2", isDim && "opacity-65")}
     >
-      <span className={clsx("flex h-full items-center gap-1 border bg-raised px-1 font-tape text-[1.12em] leading-none font-bold whitespace-nowrap", isPicked ? "border-ink bg-mark text-mark-ink" : "border-line text-ink")}>
+      <span className={clsx("flex h-full items-center gap-1 border px-1 font-tape text-[1.12em] leading-none font-bold whitespace-nowrap", isPicked ? "border-ink bg-mark text-mark-ink" : "border-line bg-raised text-ink")}>
         <span>{numbers}</span>
         {isIn && volts ? <span className="font-semibold">{volts}</span> : null}
         {isIn && check ? <span className={clsx(!isPicked && !isDim && VERDICT_TONE[check.verdict])}>{check.verdict}{check.assumed.length > 0 ? "*" : ""}</span> : null}

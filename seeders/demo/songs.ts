@@ -41,7 +41,7 @@ export const demoSongs: SeedSong[] = [
       "pad-plate-out>cond-plate-pad", "cond-plate-trig>voice-snare-trig", "voice-snare-out>desk-2-in",
       "pad-tom-h-out>cond-tom-pad", "cond-tom-trig>shape-gate-in", "shape-gate-out>voice-tom-h-trig", "voice-tom-h-out>desk-5-in",
     ],
-    knobs: { "shape-gate/hold": 0.2, "voice-snare/snap": 0.5 },
+    knobs: { "cond-plate/threshold": 0.05, "shape-gate/hold": 0.2, "voice-snare/snap": 0.5 },
   },
   {
     id: "slow-kettle",

@@ -6,10 +6,11 @@ const SCALE: Record<Prefix, number> = { p: 1e-12, n: 1e-9, u: 1e-6, m: 1e-3, "":
 
 /**
  * A value with its unit and at most 3 significant figures, for people: `4.7 kΩ`, `0.6 V`, `2.62 ms`, `−0.5 V`.
- * @param value SI, any size. A value that is not finite prints as `—`.
+ * @param figure SI, any size; volts under 0.1 µV print as 0 V. A value that is not finite prints as `—`.
  */
-export function formatQuantity(value: number, unit: Unit): string {
-  if (!Number.isFinite(value)) return "—";
+export function formatQuantity(figure: number, unit: Unit): string {
+  if (!Number.isFinite(figure)) return "—";
+  const value = orNothing(figure, unit);
   const prefix = prefixFor(value, unit);
   return `${significant(value, prefix)} ${symbol(prefix, unit)}`;
 }
@@ -17,9 +18,10 @@ export function formatQuantity(value: number, unit: Unit): string {
 /** A range under one prefix: `4.2–4.8 V`, `−0.5 to 5.5 V`; one value where both ends print alike. */
 export function formatRange(range: Range, unit: Unit): string {
   if (!Number.isFinite(range.min) || !Number.isFinite(range.max)) return "—";
-  const prefix = prefixFor(Math.max(Math.abs(range.min), Math.abs(range.max)), unit);
-  const low = significant(range.min, prefix);
-  const high = significant(range.max, prefix);
+  const [min, max] = [orNothing(range.min, unit), orNothing(range.max, unit)];
+  const prefix = prefixFor(Math.max(Math.abs(min), Math.abs(max)), unit);
+  const low = significant(min, prefix);
+  const high = significant(max, prefix);
   if (low === high) return `${low} ${symbol(prefix, unit)}`;
   const between = low.startsWith(MINUS) || high.startsWith(MINUS) ? " to " : "–";
   return `${low}${between}${high} ${symbol(prefix, unit)}`;
@@ -49,6 +51,13 @@ export function exactQuantityText(value: number, unit: Unit): string {
   const prefix = prefixFor(value, unit);
   const number = shiftDecimal(value, -PREFIX_EXPONENT[prefix]);
   return `${number} ${symbol(prefix, unit)}`;
+}
+
+/** Volts far under anything a bench can read are nothing: a level left over by a computation is not a figure. */
+const LEAST_V = 1e-7;
+
+function orNothing(value: number, unit: Unit): number {
+  return unit === "V" && Math.abs(value) < LEAST_V ? 0 : value;
 }
 
 function symbol(prefix: Prefix, unit: Unit): string {
