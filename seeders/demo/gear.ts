@@ -62,7 +62,7 @@ export const demoShapers: SeedGear[] = [
 
 export const demoVoices: SeedGear[] = [
   box("voice-low", "voice", "Low drum", "Bridged-T oscillator, rings when pinged.", "rail-12", [trigIn("voice-low"), audioOut("voice-low", "2.5–3.5")], ["Pitch", "Decay"]),
-  box("voice-snare", "voice", "Snare", "Noise and a ringing filter.", "rail-12", [trigIn("voice-snare", { pulseMinS: "1m" }), audioOut("voice-snare", "2–3")], ["Snap", "Decay"]),
+  box("voice-snare", "voice", "Snare", "Noise and a ringing filter.", "rail-12", [trigIn("voice-snare", { pulseMinS: "1.5m" }), audioOut("voice-snare", "2–3")], ["Snap", "Decay"]),
   box("voice-tin", "voice", "Tin plate", "A bare 5 V logic input behind the jack: 5.5 V is all it stands.", "rail-5", [
     input("voice-tin-trig", "Trig", { accepts: ["trigger", "gate"], onV: "0.8–2", offV: "0.8–2", safeLowV: "-0.5", safeHighV: "5.5", loadOhm: "100k" }),
     audioOut("voice-tin", "1–1.5"),
