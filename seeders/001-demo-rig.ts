@@ -2,10 +2,10 @@ import type { Sequelize, Transaction } from "sequelize";
 import { DEMO_PASSWORD } from "@/lib/auth/demo-accounts";
 import { hashPassword } from "@/lib/auth/password";
 import { gearInputSchema } from "@/lib/schemas/gear";
-import { LEAD_COLOURS, patchSchema, type Patch } from "@/lib/schemas/patch";
 import { GearRow, JackRow, Membership, PatchRevision, Rig, SetEntry, SetListRow, SongRow, User } from "@/models";
 import { demoGear } from "./demo/gear";
-import { demoSongs, type SeedSong } from "./demo/songs";
+import { demoPatch } from "./demo/demo-patch";
+import { demoSongs } from "./demo/songs";
 
 const RIG_ID = "marrow-lane";
 const SEEDED_AT = new Date("2026-01-15T19:30:00Z");
@@ -65,21 +65,7 @@ async function seedSongs(transaction: Transaction): Promise<void> {
   for (const [position, song] of demoSongs.entries()) {
     const { id, title, tempoBpm, notes } = song;
     await SongRow.create({ id, rigId: RIG_ID, title, tempoBpm, notes, position, revision: 1 }, { transaction });
-    await PatchRevision.create({ songId: id, revision: 1, authorId: "demo-performer", savedAt: SEEDED_AT, patch: patchOf(song) }, { transaction });
+    await PatchRevision.create({ songId: id, revision: 1, authorId: "demo-performer", savedAt: SEEDED_AT, patch: demoPatch(song) }, { transaction });
     await SetEntry.create({ setId: "pump-house", songId: id, position }, { transaction });
   }
-}
-
-function patchOf(song: SeedSong): Patch {
-  return patchSchema.parse({
-    leads: song.leads.map((pair, index) => {
-      const [outputId, inputId] = pair.split(">");
-      return { id: `${song.id}-${index + 1}`, number: index + 1, colour: LEAD_COLOURS[index % LEAD_COLOURS.length], outputId, inputId };
-    }),
-    knobs: Object.entries(song.knobs).map(([knob, position]) => {
-      const [gearId, knobId] = knob.split("/");
-      return { gearId, knobId, position };
-    }),
-    lanes: [[], [], [], []],
-  });
 }

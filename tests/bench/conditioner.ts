@@ -7,7 +7,7 @@ import { settleCircuit } from "@/lib/core/electrics/conditioner/settle-circuit";
 import { solveCircuit } from "@/lib/core/electrics/conditioner/solve-circuit";
 import { conditionerDeck, EASES, type Ease } from "../reference/conditioner-deck";
 import { Ngspice } from "../reference/ngspice";
-import type { BenchRow } from "./planning";
+import { row, type BenchRow } from "./bench-row";
 
 /** The contract's own example (electrics §3), with its envelope and without. */
 const PLAIN: ConditionerSpec = {
@@ -17,7 +17,6 @@ const PLAIN: ConditionerSpec = {
 };
 const WITH_ENVELOPE: ConditionerSpec = { ...PLAIN, envelope: { seriesOhm: 100, farad: 1e-6, ohm: 100e3, emitterOhm: 10e3 } };
 
-const row = (name: string, value: number, unit: string, goal: string, pass: boolean): BenchRow => ({ name, value: Number(value.toPrecision(3)), unit, goal, pass });
 /** The least of several times, for both sides alike: what else the machine does only ever adds. */
 const least = (times: number[]) => Math.min(...times);
 

@@ -1,14 +1,7 @@
 import loadHighs from "highs";
 import { orderSet, planSet, type OrderRequest } from "@/lib/core/planning";
 import { makePlanningSource } from "../factories/planning";
-
-export interface BenchRow {
-  name: string;
-  value: number;
-  unit: string;
-  goal: string;
-  pass: boolean;
-}
+import { row, type BenchRow } from "./bench-row";
 
 /** The solver is stopped here; what it took is then a lower bound. */
 const SOLVER_LIMIT_S = 20;
@@ -24,8 +17,6 @@ function time<T>(work: () => T, runs: number): { ms: number; answer: T } {
   }
   return { ms: times.sort((a, b) => a - b)[Math.floor(runs / 2)] ?? 0, answer };
 }
-
-const row = (name: string, value: number, unit: string, goal: string, pass: boolean): BenchRow => ({ name, value: Number(value.toPrecision(3)), unit, goal, pass });
 
 /** Changeovers and order at the sizes the product promises, beside a MIP solver (HiGHS) on the same set. */
 export async function bench(): Promise<BenchRow[]> {

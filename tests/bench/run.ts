@@ -1,13 +1,6 @@
 import { mkdirSync, writeFileSync } from "node:fs";
 import { dirname, join } from "node:path";
-
-export interface BenchRow {
-  name: string;
-  value: number;
-  unit: string;
-  goal: string;
-  pass: boolean;
-}
+import type { BenchRow } from "./bench-row";
 
 /** Every bench by its name; each gives rows. */
 const BENCHES: Record<string, () => Promise<{ bench: () => Promise<BenchRow[]> | BenchRow[] }>> = {

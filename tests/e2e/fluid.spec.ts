@@ -1,5 +1,5 @@
 import { expect, test } from "@playwright/test";
-import { seeded } from "../factories/random-board";
+import { seededRandom } from "../../lib/core/electrics/tolerance/seeded-random";
 import { signIn } from "./people";
 
 /* 60 cards and 100 leads: no task over 50 ms while a card, and then a lead, is dragged. */
@@ -23,7 +23,7 @@ test("a board of 60 cards and 100 leads stays fluid while dragging", async ({ pa
     for (const jack of gear.jacks) jacks[jack.direction === "output" ? "outs" : "ins"][lane]?.push(jack.id);
   }
   const { song } = (await (await page.request.post(`${at}/songs`, { data: { title: "A hundred leads", tempoBpm: null, notes: "" } })).json()) as { song: { id: string } };
-  const random = seeded(5);
+  const random = seededRandom(5);
   const pick = (list: readonly string[]) => list[Math.floor(random() * list.length)] as string;
   const pairs = new Set<string>();
   while (pairs.size < 100) {

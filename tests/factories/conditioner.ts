@@ -1,9 +1,9 @@
 import type { ConditionerSpec } from "@/lib/core/electrics/conditioner/conditioner-types";
-import { seeded } from "./random-board";
+import { seededRandom } from "@/lib/core/electrics/tolerance/seeded-random";
 
 /** A random conditioner over every option of the contract, the same for the same seed. */
 export function randomConditioner(seed: number): ConditionerSpec {
-  const next = seeded(seed * 7919 + 13);
+  const next = seededRandom(seed * 7919 + 13);
   const between = (low: number, high: number) => low + (high - low) * next();
   const decades = (low: number, high: number) => low * (high / low) ** next();
   const chance = (share: number) => next() < share;

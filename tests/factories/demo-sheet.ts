@@ -1,31 +1,15 @@
 import { checkGearPatch } from "@/lib/data/check-gear-patch";
 import type { SheetSource } from "@/lib/paper/build-sheet-view";
 import { gearInputSchema, type Gear } from "@/lib/schemas/gear";
-import { LEAD_COLOURS, patchSchema, type Patch } from "@/lib/schemas/patch";
 import { demoGear } from "@/seeders/demo/gear";
+import { demoPatch } from "@/seeders/demo/demo-patch";
 import { demoSongs } from "@/seeders/demo/songs";
-
-type DemoSong = (typeof demoSongs)[number];
 
 /** The demo rig's gear as the database would give it. */
 export function demoRigGear(): Gear[] {
   return demoGear.map(({ id, gear: draft }, position) => {
     const gear = gearInputSchema.parse(draft);
     return { ...gear, id, kind: gear.details.kind, retired: false, revision: 1, position };
-  });
-}
-
-export function demoPatch(song: DemoSong): Patch {
-  return patchSchema.parse({
-    leads: song.leads.map((pair, index) => {
-      const [outputId, inputId] = pair.split(">");
-      return { id: `${song.id}-${index + 1}`, number: index + 1, colour: LEAD_COLOURS[index % LEAD_COLOURS.length], outputId, inputId };
-    }),
-    knobs: Object.entries(song.knobs).map(([knob, position]) => {
-      const [gearId, knobId] = knob.split("/");
-      return { gearId, knobId, position };
-    }),
-    lanes: [[], [], [], []],
   });
 }
 

@@ -1,24 +1,13 @@
+import { seededRandom } from "@/lib/core/electrics/tolerance/seeded-random";
 import type { ChartCard, ChartLead, ChartMetrics, LaneIndex } from "@/lib/core/chart";
 
 export const boardMetrics: ChartMetrics = {
   cardWidth: 168, tapeHeight: 32, jackPitch: 28, cardGap: 12, trackPitch: 10, outTagWidth: 34, inTagWidth: 120, gutterMin: 32, tagHeight: 20,
 };
 
-/** A seeded source of numbers 0…1 (mulberry32, public domain). */
-export function seeded(seed: number): () => number {
-  let state = seed >>> 0;
-  return () => {
-    state = (state + 0x6d2b79f5) >>> 0;
-    let t = state;
-    t = Math.imul(t ^ (t >>> 15), t | 1);
-    t ^= t + Math.imul(t ^ (t >>> 7), t | 61);
-    return ((t ^ (t >>> 14)) >>> 0) / 4294967296;
-  };
-}
-
 /** Cards with random jacks in random lanes, and leads between random outputs and inputs. */
 export function randomBoard(seed: number, cardCount: number, leadCount: number): { cards: ChartCard[]; leads: ChartLead[] } {
-  const next = seeded(seed);
+  const next = seededRandom(seed);
   const int = (n: number) => Math.floor(next() * n);
   const cards = Array.from({ length: cardCount }, (_, i): ChartCard => ({
     id: `c${i}`,

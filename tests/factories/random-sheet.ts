@@ -5,7 +5,7 @@ import type { SheetSource } from "@/lib/paper/build-sheet-view";
 import { gearInputSchema, type Gear, type GearKind } from "@/lib/schemas/gear";
 import type { Jack } from "@/lib/schemas/jack";
 import { LEAD_COLOURS, type Patch } from "@/lib/schemas/patch";
-import { seeded } from "./random-board";
+import { seededRandom } from "@/lib/core/electrics/tolerance/seeded-random";
 
 const ALPHABETS = [
   "abcdefghijklmnopqrstuvwxyz ", "WMQ@%& ", "ÀÉÎÕÜłżčğşøåß ", "10 kΩ µF ±½ ", "Большой малый ", "Ωμέγα δέλτα ", "שלום תוף ", "太鼓パッド 鼓 ", "W",
@@ -30,7 +30,7 @@ const KINDS: readonly GearKind[] = ["pad", "conditioner", "shaper", "voice", "de
 
 /** A rig nobody would build: any box into any box, names of every kind, verdicts dealt at random. Same seed, same sheet. */
 export function randomSheet(seed: number, sizes: Sizes): SheetSource {
-  const next = seeded(seed);
+  const next = seededRandom(seed);
   const int = (below: number) => Math.floor(next() * below);
   const name = () => randomName(next, sizes.nameLength);
   const gear = Array.from({ length: Math.max(4, Math.ceil(sizes.leads * 0.9)) }, (_, index) => randomGear(index, KINDS[int(KINDS.length)] as GearKind, name, int));
@@ -115,5 +115,5 @@ export function denseSheet(runs: number): SheetSource {
     knobs: [],
     lanes: [[], [], [], []],
   };
-  return { ...randomSheet(1, { leads: 1, knobs: 0, noteLength: 0 }), rigName: "Two trolleys", song: { title: "Everything at once", tempoBpm: 120, notes: "" }, place: null, gear, patch, check: randomCheck(patch, seeded(5)), before: null };
+  return { ...randomSheet(1, { leads: 1, knobs: 0, noteLength: 0 }), rigName: "Two trolleys", song: { title: "Everything at once", tempoBpm: 120, notes: "" }, place: null, gear, patch, check: randomCheck(patch, seededRandom(5)), before: null };
 }

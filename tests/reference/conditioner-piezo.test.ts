@@ -1,13 +1,13 @@
 import { expect, it } from "vitest";
 import { simulatePiezo, type PiezoSpec } from "@/lib/core/electrics";
-import { seeded } from "../factories/random-board";
+import { seededRandom } from "@/lib/core/electrics/tolerance/seeded-random";
 import { most, pulsesAt } from "./conditioner-readings";
 import { Ngspice } from "./ngspice";
 
 const COUNT = 40;
 
 function randomPiezo(seed: number): PiezoSpec {
-  const next = seeded(seed * 977 + 5);
+  const next = seededRandom(seed * 977 + 5);
   const decades = (low: number, high: number) => low * (high / low) ** next();
   const ringHz = decades(80, 4000);
   return {

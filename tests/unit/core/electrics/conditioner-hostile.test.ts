@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { findConditionerIssues, simulateConditioner, type ConditionerSpec } from "@/lib/core/electrics";
-import { seeded } from "../../../factories/random-board";
+import { seededRandom } from "@/lib/core/electrics/tolerance/seeded-random";
 
 const example: ConditionerSpec = {
   supply: { highV: 9, lowV: 0 }, pad: { kind: "resistive", restOhm: 47e3, hitOhm: 9100, leg: "upper" }, strike: { riseS: 1e-3, holdS: 5e-3, fallS: 30e-3 },
@@ -61,7 +61,7 @@ describe("hostile figures", () => {
   });
 
   it("two figures at once at the ends of what is allowed (seeded)", { timeout: 120_000 }, () => {
-    const next = seeded(7);
+    const next = seededRandom(7);
     const ends: Record<string, [number, number]> = { Ohm: [1e-3, 1e15], ohm: [1e-3, 1e15], farad: [1e-15, 1], V: [1e-3, 1e4], A: [1e-9, 1e3], S: [0, 86_400], turn: [0, 1] };
     let answers = 0;
     for (let i = 0; i < 150; i += 1) {

@@ -6,7 +6,7 @@ import { solveCircuit } from "@/lib/core/electrics/conditioner/solve-circuit";
 import { listParts } from "@/lib/core/electrics/tolerance/list-parts";
 import { nominalOf, toRange, type Range, type Spread } from "@/lib/core/units/spread";
 import { randomConditioner } from "../../../factories/conditioner";
-import { seeded } from "../../../factories/random-board";
+import { seededRandom } from "@/lib/core/electrics/tolerance/seeded-random";
 
 const foam: ConditionerQuestion = {
   circuit: {
@@ -58,7 +58,7 @@ describe("a conditioner with its pad, for the patch", () => {
   });
 
   it("what is called good fires at 20 random builds of each of 150 circuits, within the figures told (seeded)", () => {
-    const next = seeded(3);
+    const next = seededRandom(3);
     let good = 0;
     for (let seed = 0; seed < 400 && good < 150; seed += 1) {
       const spec = randomConditioner(seed);
