@@ -31,7 +31,9 @@ export function parseOrThrow<S extends z.ZodType>(schema: S, data: unknown): z.o
 
 function faultsOf(issue: z.core.$ZodIssue): FieldFault[] {
   if (issue.code === "unrecognized_keys") return issue.keys.map((key) => fieldFault([...issue.path, key], "There is no such field."));
-  return [fieldFault(issue.path, issue.message)];
+  // The schema library speaks of types; a person wants to know that something is missing.
+  const isMissing = issue.code === "invalid_type" && issue.message.endsWith("received undefined");
+  return [fieldFault(issue.path, isMissing ? "This is missing." : issue.message)];
 }
 
 async function readText(request: Request): Promise<string> {

@@ -39,6 +39,11 @@ describe("bad input to the connection calculator", () => {
     expect(problem.errors?.map((fault) => fault.field)).toContain(field);
   });
 
+  it("a figure that is not there is called missing", async () => {
+    const problem = await refused({ ...good, outputs: [{ signal: "trigger", activeV: 8, sourceOhm: 0 }] });
+    expect(problem.errors).toContainEqual({ field: "outputs.0.restV", pointer: "#/outputs/0/restV", detail: expect.stringMatching(/missing|Give a number/) });
+  });
+
   it("a number too large for JSON is refused, not passed on as infinity", async () => {
     const response = await new Client().request("POST", "/api/v1/connection", JSON.stringify(good).replace('"activeV":8', '"activeV":1e999'));
     expect(response.status).toBe(400);
