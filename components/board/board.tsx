@@ -188,7 +188,7 @@ export function Board(props: BoardProps) {
         {armed ? <p role="status" className="fixed bottom-4 left-1/2 z-10 max-w-[90vw] -translate-x-1/2 border-2 border-ink border-l-8 border-l-mark bg-bench px-3 py-1.5 shadow-lg"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
         <div ref={frameRef} className="w-full">
           {cards.length === 0 || (patch.leads.length === 0 && canEdit) ? <FirstRun rigId={rigId} gear={gear} can={can} /> : null}
-          {showsRuns ? (
+          {cards.length === 0 ? null : showsRuns ? (
             <div className="flex flex-col gap-5">
               {isNarrow && canEdit ? <JackList cards={cards} armed={armed} onOpen={setListFrom} /> : null}
               <RunList check={check} leads={patch.leads} gearName={gearName} leadLabel={leadLabel} pickedLeadId={pickedLeadId} onPick={pickLead} />

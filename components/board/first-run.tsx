@@ -1,32 +1,69 @@
-import type { Can } from "@/lib/rights/can";
-import type { Gear, GearKind } from "@/lib/schemas/gear";
+"use client";
+import { useRouter } from "next/navigation";
+import { useState } from "react";
+import { fetchJson, ProblemError } from "@/lib/client/fetch-json";
+import { startingGear, startingVariants } from "@/lib/core/electrics/starting-figures";
 import { paths } from "@/lib/paths";
-import { ButtonLink } from "../ui/button";
+import type { Can } from "@/lib/rights/can";
+import type { Gear } from "@/lib/schemas/gear";
+import { Button } from "../ui/button";
 import { EmptyState } from "../ui/empty-state";
+import { Notice } from "../ui/notice";
 
-const QUESTIONS: readonly { kind: GearKind; question: string; text: string; action: string }[] = [
-  { kind: "pad", question: "What do you hit?", text: "A foam pad, a piezo disc, a foot switch: it comes with figures to start from.", action: "Add a pad" },
-  { kind: "conditioner", question: "What turns it into a pulse?", text: "A circuit known by its parts, or a box known by its readings.", action: "Add a conditioner" },
-  { kind: "voice", question: "What should sound?", text: "A drum voice with an input that waits for a pulse.", action: "Add a voice" },
-];
+const QUESTIONS = [
+  { kind: "pad", question: "What do you hit?" },
+  { kind: "conditioner", question: "What turns it into a pulse?" },
+  { kind: "voice", question: "What should sound?" },
+] as const;
 
-/** One question at a time until a first run can be plugged; then how to plug it. */
+/** One question at a time, each answered by gear with starting figures, until a first run can be plugged; then how to plug it. */
 export function FirstRun({ rigId, gear, can }: { rigId: string; gear: readonly Gear[]; can: Can }) {
+  const router = useRouter();
+  const [busy, setBusy] = useState(false);
+  const [refusal, setRefusal] = useState<string | null>(null);
   const missing = QUESTIONS.findIndex(({ kind }) => !gear.some((item) => item.kind === kind));
   const next = QUESTIONS[missing];
-  if (next) {
-    if (!can.editGear) return <EmptyState title="No gear to plug yet">The performer or a collaborator adds it.</EmptyState>;
+
+  if (!next) {
     return (
       <div className="mb-5">
-        <EmptyState title={`${missing + 1} of ${QUESTIONS.length}: ${next.question}`} action={<ButtonLink tone="primary" href={paths.newGear(rigId, next.kind)}>{next.action}</ButtonLink>}>{next.text}</EmptyState>
+        <EmptyState title="Plug the first lead">
+          Drag a pad’s jack onto a conditioner’s <em>Pad in</em>. Or tap one, then the other. Or move to a jack with Tab and press Enter for the list of what it could go to, each with the verdict it would get.
+        </EmptyState>
       </div>
     );
   }
+  if (!can.editGear) return <EmptyState title="No gear to plug yet">The performer or a collaborator adds it.</EmptyState>;
+
+  async function add(kind: (typeof QUESTIONS)[number]["kind"], variant: string) {
+    setBusy(true);
+    setRefusal(null);
+    try {
+      await fetchJson(paths.api.gearList(rigId), { body: startingGear(kind, variant, () => crypto.randomUUID()) });
+      router.refresh();
+    } catch (error) {
+      if (!(error instanceof ProblemError)) throw error;
+      setRefusal(error.problem.detail);
+    } finally {
+      setBusy(false);
+    }
+  }
+
   return (
     <div className="mb-5">
-      <EmptyState title="Plug the first lead">
-        Drag a pad’s jack onto a conditioner’s <em>Pad in</em>. Or tap one, then the other. Or move to a jack with Tab and press Enter for the list of what it could go to, each with the verdict it would get.
+      <EmptyState
+        title={`${missing + 1} of ${QUESTIONS.length}: ${next.question}`}
+        action={
+          <ul className="flex flex-wrap gap-3">
+            {startingVariants(next.kind).map((item) => (
+              <li key={item.variant}><Button disabled={busy} title={item.hint} onClick={() => void add(next.kind, item.variant)}>{item.label}</Button></li>
+            ))}
+          </ul>
+        }
+      >
+        It comes with figures to start from, marked as assumed until you measure your own. Name and figures can be changed under Gear.
       </EmptyState>
+      {refusal ? <Notice tone="error" live>{refusal}</Notice> : null}
     </div>
   );
 }

@@ -1,5 +1,5 @@
 import { expect, test } from "@playwright/test";
-import { drag, newSong, RIG, saved, signIn } from "./people";
+import { drag, newSong, RIG, saved, signIn, signUp } from "./people";
 
 const tag = (number: number) => new RegExp(`^Lead ${number}, .* to `);
 
@@ -148,4 +148,24 @@ test("a set list is ordered by dragging, by keys and by buttons", async ({ page 
   await expect(page.getByText(/Saved · revision/)).toBeVisible();
   await page.reload();
   expect((await titles()).slice(0, 2)).toEqual([first, second]);
+});
+
+test("an empty rig has its first run on the board after three questions", async ({ page }) => {
+  await signUp(page, "First Run");
+  const { rig } = (await (await page.request.post("/api/v1/rigs", { data: { name: "Three questions" } })).json()) as { rig: { id: string } };
+  const { song } = (await (await page.request.post(`/api/v1/rigs/${rig.id}/songs`, { data: { title: "One", tempoBpm: null, notes: "" } })).json()) as { song: { id: string } };
+  await page.goto(`/rigs/${rig.id}/songs/${song.id}`);
+  for (const [question, cards] of [["1 of 3: What do you hit?", 1], ["2 of 3: What turns it into a pulse?", 2], ["3 of 3: What should sound?", 3]] as const) {
+    await expect(page.getByText(question)).toBeVisible();
+    await page.locator("main li button").first().click();
+    await expect(page.locator("[data-card]")).toHaveCount(cards);
+  }
+  await expect(page.getByText("Plug the first lead")).toBeVisible();
+  const jacks = await page.locator("[data-jack]").evaluateAll((all) => all.map((jack) => ({ id: jack.getAttribute("data-jack"), side: jack.getAttribute("data-side") })));
+  await page.locator(`[data-jack="${jacks.find((jack) => jack.side === "out")?.id}"]`).click();
+  await page.locator(`[data-jack="${jacks.find((jack) => jack.side === "in")?.id}"]`).click();
+  await saved(page);
+  // Assumed figures are marked, and one measurement is named.
+  await expect(page.locator("[data-lead-tag]")).toContainText("*");
+  await expect(page.getByText("Measure next:")).toBeVisible();
 });
