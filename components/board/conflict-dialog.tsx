@@ -36,7 +36,7 @@ export function ConflictDialog({ conflict, names, onSettle }: ConflictDialogProp
         </>
       }
     >
-      <p className="mb-4">Their save is revision {conflict.theirs.revision}. What only one of you changed is kept from both; choose for the rest. You can undo afterwards.</p>
+      <p className="mb-4">Their save is revision {conflict.theirs.revision}. What only one of you changed is kept from both; choose for the rest.</p>
       <ul className="flex flex-col gap-4">
         {conflicts.map((item) => (
           <li key={item.id}>

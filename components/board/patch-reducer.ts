@@ -1,4 +1,5 @@
 import { LEAD_COLOURS, type Inline, type Lead, type Patch } from "@/lib/schemas/patch";
+import { mergePatches } from "./merge-patches";
 
 export type PatchEdit =
   | { type: "plug"; id: string; outputId: string; inputId: string }
@@ -16,7 +17,15 @@ export interface PatchHistory {
   future: Patch[];
 }
 
-export type HistoryAction = PatchEdit | { type: "undo" } | { type: "redo" };
+/** Somebody else's save taken in: `present` is the merge, and every step to undo or redo to is merged with it too. */
+export interface Rebase {
+  type: "rebase";
+  base: Patch;
+  theirs: Patch;
+  present: Patch;
+}
+
+export type HistoryAction = PatchEdit | { type: "undo" } | { type: "redo" } | Rebase;
 
 const MOST_UNDO = 200;
 
@@ -34,6 +43,11 @@ export function reduceHistory(history: PatchHistory, action: HistoryAction): Pat
   if (action.type === "redo") {
     const [after, ...rest] = future;
     return after ? { past: [...past, present], present: after, future: rest } : history;
+  }
+  if (action.type === "rebase") {
+    // Undoing my own edit must never take theirs away.
+    const onTheirs = (mine: Patch) => mergePatches(action.base, mine, action.theirs).patch;
+    return { past: past.map(onTheirs), present: action.present, future: future.map(onTheirs) };
   }
   const next = editPatch(present, action);
   return next === present ? history : { past: [...past, present].slice(-MOST_UNDO), present: next, future: [] };

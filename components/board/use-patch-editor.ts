@@ -19,6 +19,8 @@ interface Saved {
 
 export interface OpenConflict {
   merge: Merge;
+  /** What both began from. */
+  base: Patch;
   theirs: Saved;
 }
 
@@ -54,11 +56,11 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   const takeIn = useCallback((base: Patch, mine: Patch, theirs: Saved) => {
     const merge = mergePatches(base, mine, theirs.patch);
     if (merge.conflicts.length > 0) {
-      setConflict({ merge, theirs });
+      setConflict({ merge, base, theirs });
       return;
     }
     noteSaved(theirs);
-    dispatch({ type: "replace", patch: merge.patch });
+    dispatch({ type: "rebase", base, theirs: theirs.patch, present: merge.patch });
     setNews("Somebody else saved this song too. Both their changes and yours are here.");
   }, [noteSaved]);
 
@@ -136,7 +138,7 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
       dropPatchDraft(songId);
       setState({ status: "saved" });
     }
-    dispatch({ type: "replace", patch });
+    dispatch({ type: "rebase", base: conflict.base, theirs: conflict.theirs.patch, present: patch });
   }, [conflict, noteSaved, songId]);
 
   const isDirty = !same(present, saved.patch);

@@ -1,5 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
+import { mergePatches } from "@/components/board/merge-patches";
 import { editPatch, reduceHistory, startHistory, type PatchEdit } from "@/components/board/patch-reducer";
 import { emptyPatch, patchSchema } from "@/lib/schemas/patch";
 
@@ -48,5 +49,20 @@ describe("history", () => {
       for (let i = 0; i < steps; i += 1) history = reduceHistory(history, { type: "redo" });
       expect(history.present).toBe(end);
     }));
+  });
+});
+
+describe("undo after somebody else's save was taken in", () => {
+  it("takes my edit away and leaves theirs", () => {
+    const base = editPatch(emptyPatch, plug("a", "o1", "i1"));
+    const mine = editPatch(base, plug("mine", "o2", "i2"));
+    const theirs = editPatch(base, plug("theirs", "o3", "i3"));
+    let history = reduceHistory(startHistory(base), plug("mine", "o2", "i2"));
+    history = reduceHistory(history, { type: "rebase", base, theirs, present: mergePatches(base, mine, theirs).patch });
+    expect(history.present.leads.map((lead) => lead.id).sort()).toEqual(["a", "mine", "theirs"]);
+    history = reduceHistory(history, { type: "undo" });
+    expect(history.present.leads.map((lead) => lead.id).sort()).toEqual(["a", "theirs"]);
+    history = reduceHistory(history, { type: "redo" });
+    expect(history.present.leads.map((lead) => lead.id).sort()).toEqual(["a", "mine", "theirs"]);
   });
 });
