@@ -8,6 +8,7 @@ import type { Gear } from "@/lib/schemas/gear";
 import { laneOf } from "@/lib/schemas/lane-of";
 import type { Lead, Patch } from "@/lib/schemas/patch";
 import { useAnnounce } from "../ui/announcer";
+import { Button } from "../ui/button";
 import { Notice } from "../ui/notice";
 import { BoardCanvas } from "./board-canvas";
 import { PluggingContext, type Plugging } from "./board-context";
@@ -15,6 +16,7 @@ import { lanesOf, orderCards, sideOf } from "./board-lanes";
 import { BoardToolbar } from "./board-toolbar";
 import { ConflictDialog } from "./conflict-dialog";
 import { namesOf } from "./describe-changes";
+import { findGone } from "./find-gone";
 import { FirstRun } from "./first-run";
 import { KnobDialog } from "./knob-dialog";
 import { LeadPanel } from "./lead-panel";
@@ -80,6 +82,7 @@ export function Board(props: BoardProps) {
 
   const from = listFrom ?? armed;
   const candidates = useCandidates(rigId, songId, patch, from);
+  const gone = useMemo(() => findGone(patch, gear), [gear, patch]);
   const picked = patch.leads.find((lead) => lead.id === pickedLeadId);
 
   const plug = useCallback((a: string, b: string) => {
@@ -184,6 +187,16 @@ export function Board(props: BoardProps) {
           filter={filter} onFilter={setFilter} onTidy={tidy}
         />
         {failed ? <Notice tone="error" title="Not checked" live className="mb-3">The server did not answer the check. The verdicts shown are from before; they follow with the next change.</Notice> : null}
+        {gone ? (
+          <Notice tone="caution" title="Something in this song is gone from its box" className="mb-3">
+            <p className="mb-2">
+              {gone.leadNumbers.length > 0 ? `Lead ${gone.leadNumbers.join(", ")} ended at a jack that the gear no longer has. ` : ""}
+              {gone.knobs > 0 ? "A knob that was set here is no longer on its box. " : ""}
+              Until it is cleared, changes to this song cannot be saved.
+            </p>
+            {canEdit ? <Button onClick={() => edit({ type: "replace", patch: gone.patch })}>Clear what is gone</Button> : null}
+          </Notice>
+        ) : null}
         {editor.news ? <Notice tone="done" live className="mb-3">{editor.news} <button type="button" className="underline" onClick={editor.dismissNews}>Good</button></Notice> : null}
         {armed ? <p role="status" className="fixed bottom-4 left-1/2 z-10 max-w-[90vw] -translate-x-1/2 border-2 border-ink border-l-8 border-l-mark bg-bench px-3 py-1.5 shadow-lg"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
         <div ref={frameRef} className="w-full">
