@@ -2,11 +2,11 @@ import "server-only";
 import type { NextAuthOptions } from "next-auth";
 import CredentialsProvider from "next-auth/providers/credentials";
 import { paths } from "@/lib/paths";
-import { takeTurn } from "@/lib/http/rate-limit";
+import { forgetTurns, takeTurn } from "@/lib/http/rate-limit";
 import { signInSchema } from "@/lib/schemas/account";
 import { verifySignIn } from "./verify-sign-in";
 
-/** Tries one address may make in a quarter of an hour. */
+/** Wrong passwords in a row for one address in a quarter of an hour. */
 const TRIES = 30;
 const WINDOW_S = 900;
 
@@ -20,8 +20,10 @@ export const authOptions: NextAuthOptions = {
         const parsed = signInSchema.safeParse({ email: credentials?.email, password: credentials?.password });
         if (!parsed.success) return null;
         const { email, password } = parsed.data;
-        if (!takeTurn(`sign-in:${email}`, TRIES, WINDOW_S).allowed) return null;
+        const key = `sign-in:${email}`;
+        if (!takeTurn(key, TRIES, WINDOW_S).allowed) return null;
         const user = await verifySignIn(email, password);
+        if (user) forgetTurns(key);
         return user && { id: user.id, name: user.name, email: user.email, sessionEpoch: user.sessionEpoch };
       },
     }),

@@ -18,3 +18,8 @@ export function takeTurn(key: string, most: number, windowS: number, nowMs: numb
   const retryAfterS = Math.max(1, Math.ceil((current.startedMs + windowS * 1000 - nowMs) / 1000));
   return { allowed: current.count <= most, retryAfterS };
 }
+
+/** Begins a key's window anew: the turns so far were honest ones. */
+export function forgetTurns(key: string): void {
+  windows.delete(key);
+}
