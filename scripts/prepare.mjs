@@ -43,7 +43,7 @@ async function install() {
   const nodePrefix = dirname(dirname(process.execPath));
   const hasHeaders = existsSync(join(nodePrefix, "include", "node", "node.h"));
   const env = { ...process.env, NODE_ENV: "development", ...(hasHeaders ? { npm_config_nodedir: nodePrefix } : {}) };
-  await run("npm", ["ci", "--include=dev", "--no-audit", "--no-fund"], { cwd: root, env });
+  await run("npm", ["ci", "--include=dev", "--no-audit", "--no-fund", "--loglevel=error"], { cwd: root, env });
   write(stamp, hash);
 }
 
