@@ -48,7 +48,7 @@ export interface SeriesResistorFix extends FixBase { kind: "series-resistor"; se
 export interface SeriesDiodeFix extends FixBase { kind: "series-diode"; dropV: Range; pullDownOhm: number | null }
 export interface LighterLoadFix extends FixBase { kind: "lighter-load"; loadOhm: number | null; dropListeners: string[] }
 export interface PulseWidthFix extends FixBase { kind: "pulse-width"; part: "ohm" | "farad"; value: number; tol: number; pulseS: Range }
-export interface ThroughGearFix extends FixBase { kind: "buffer" | "shaper" | "conditioner"; gearId: string; name: string; feedVerdict: Verdict }
+export interface ThroughGearFix extends FixBase { kind: "buffer" | "shaper" | "conditioner"; gearId: string; name: string; feedVerdict: Verdict; through?: ThroughJacks }
 
 /** A way out that has itself been through the check. Parts in SI. */
 export type Fix = DividerFix | DiodeDividerFix | SeriesResistorFix | SeriesDiodeFix | LighterLoadFix | PulseWidthFix | ThroughGearFix;
@@ -56,8 +56,11 @@ export type Fix = DividerFix | DiodeDividerFix | SeriesResistorFix | SeriesDiode
 /** The parts that set a pulse's width, which is proportional to ohm × farad. */
 export interface PulseParts { ohm: number; farad: number }
 
+/** The jacks of a box that a lead would go into and come out of, where the box stands in a rig. */
+export interface ThroughJacks { inputId: string; outputId: string }
+
 /** A free shaper, buffer or conditioner of the rig that a lead could go through. */
-export interface FreeGear { gearId: string; name: string; input: Input; output: Output }
+export interface FreeGear { gearId: string; name: string; input: Input; output: Output; through?: ThroughJacks }
 
 /** What fixes may be made from. Absent lists: preferred numbers, E12 first, then E24. */
 export interface FixOptions {

@@ -8,7 +8,7 @@ export function findFreeGear(connection: Connection, place: number, options: Fix
   const input = connection.inputs[place];
   if (!input) return null;
   let tight: ThroughGearFix | null = null;
-  for (const { gearId, name, input: into, output } of options.freeGear ?? []) {
+  for (const { gearId, name, input: into, output, through } of options.freeGear ?? []) {
     const inputs = connection.inputs.map((other, i) => (i === place ? into : other));
     const feed = checkBare({ outputs: connection.outputs, inputs }).listeners[place] ?? null;
     const check = checkBare({ outputs: [output], inputs: [input] }).listeners[0] ?? null;
@@ -17,7 +17,7 @@ export function findFreeGear(connection: Connection, place: number, options: Fix
     const kind = connection.outputs.some((other) => other.signal === output.signal) ? "buffer" : "shaper";
     const fix: ThroughGearFix = {
       kind, gearId, name, verdict, feedVerdict: feed.verdict, highV: check.highV, lowV: check.lowV,
-      text: `Lead it through ${name}, which is free in this song.`,
+      text: `Lead it through ${name}, which is free in this song.`, ...(through ? { through } : {}),
     };
     if (verdict === "good") return fix;
     tight ??= fix;

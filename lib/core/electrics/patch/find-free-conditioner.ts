@@ -30,6 +30,7 @@ export function findFreeConditioner(context: NodeContext, node: PatchNode, conne
 function tryConditioner({ index, simulate }: NodeContext, gear: GearModel, pad: NonNullable<GearModel["pad"]>, connection: Connection, place: number): ThroughGearFix | null {
   const input = connection.inputs[place];
   if (!input || !gear.circuit || !simulate) return null;
+  const into = gear.jacks.find((jack) => jack.role === "pad-in");
   const outcome = simulate({ circuit: gear.circuit, pad, turn: turnOf(index, gear), loadOhm: input.loadOhm });
   if (outcome.verdict !== "good" && outcome.verdict !== "tight") return null;
   for (const jack of gear.jacks) {
@@ -39,6 +40,7 @@ function tryConditioner({ index, simulate }: NodeContext, gear: GearModel, pad: 
     return {
       kind: "conditioner", gearId: gear.id, name: gear.name, feedVerdict: outcome.verdict, verdict: worstVerdict([outcome.verdict, check.verdict]),
       highV: check.highV, lowV: check.lowV, text: `Lead the pad through ${gear.name}, which is free in this song, from its jack ${jack.name}.`,
+      ...(into ? { through: { inputId: into.id, outputId: jack.id } } : {}),
     };
   }
   return null;

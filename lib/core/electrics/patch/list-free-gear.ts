@@ -11,7 +11,7 @@ export function listFreeGear(index: PatchIndex): FreeGear[] {
     const input = gear.jacks.find((jack) => jack.direction === "input" && jack.role === "plain" && jack.input);
     const output = gear.jacks.find((jack) => jack.direction === "output" && isComplete(jack));
     if (!input || !output) return [];
-    return [{ gearId: gear.id, name: gear.name, input: resolveInput({ jack: input, gear }), output: output.output as Output }];
+    return [{ gearId: gear.id, name: gear.name, input: resolveInput({ jack: input, gear }), output: output.output as Output, through: { inputId: input.id, outputId: output.id } }];
   });
 }
 

@@ -109,7 +109,7 @@ describe("boxes that are free in a song", () => {
   it("a bare pad on a voice is led through a free conditioner that it fires", () => {
     const check = checkPatch(rig, plug([lead(1, "p1.out", "v1.in")]), standIn());
     expect(check.leads.l1!.verdict).toBe("wrong-kind");
-    expect(check.leads.l1!.fixes).toMatchObject([{ kind: "conditioner", gearId: "c1", verdict: "good", feedVerdict: "good" }]);
+    expect(check.leads.l1!.fixes).toMatchObject([{ kind: "conditioner", gearId: "c1", verdict: "good", feedVerdict: "good", through: { inputId: "c1.pad", outputId: "c1.trig" } }]);
     expect(checkPatch(rig, plug([lead(1, "p2.out", "v1.in")]), standIn()).leads.l1!.fixes).toEqual([]);
   });
   it("a trigger on an envelope input goes through a free shaper, until that is taken", () => {
@@ -118,7 +118,7 @@ describe("boxes that are free in a song", () => {
     const gear = { gear: [...rig.gear, shaper, wants] };
     const leads = [...patch.leads.slice(0, 1), lead(7, "c1.trig", "e.in")];
     const before = checkPatch(gear, plug(leads), standIn());
-    expect(before.leads.l7!.fixes).toMatchObject([{ kind: "shaper", gearId: "s" }]);
+    expect(before.leads.l7!.fixes).toMatchObject([{ kind: "shaper", gearId: "s", through: { inputId: "s.in", outputId: "s.out" } }]);
     const taken = plug([...leads, lead(8, "v3.out", "s.in")]);
     const after = recheckPatch(before, gear, taken, [], standIn());
     expect(after.leads.l7!.fixes).toEqual([]);
