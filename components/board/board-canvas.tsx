@@ -1,10 +1,11 @@
 "use client";
-import { closestCenter, DndContext, DragOverlay, KeyboardSensor, PointerSensor, useSensor, useSensors, type Announcements, type CollisionDetection, type DragEndEvent, type DragStartEvent, type Modifier } from "@dnd-kit/core";
+import { closestCenter, DndContext, DragOverlay, KeyboardCode, KeyboardSensor, PointerSensor, useSensor, useSensors, type Announcements, type CollisionDetection, type DragEndEvent, type DragStartEvent, type Modifier } from "@dnd-kit/core";
 import { SortableContext, sortableKeyboardCoordinates, verticalListSortingStrategy } from "@dnd-kit/sortable";
 import { memo, useId, useMemo, useState } from "react";
 import type { Chain, ChartLayout, PlacedJack } from "@/lib/core/chart";
 import type { Verdict } from "@/lib/core/electrics/jacks";
-import type { PatchCheck } from "@/lib/core/electrics/patch-types";
+import { severityOf } from "@/lib/core/electrics/judge/order-verdicts";
+import type { LeadCheck, PatchCheck } from "@/lib/core/electrics/patch-types";
 import type { Gear } from "@/lib/schemas/gear";
 import type { Lead, Patch } from "@/lib/schemas/patch";
 import { ChartTracks } from "../chart/chart-tracks";
@@ -20,6 +21,7 @@ interface BoardCanvasProps {
   cards: readonly Gear[];
   layout: ChartLayout;
   scale: number;
+  isCompact: boolean;
   patch: Patch;
   check: PatchCheck;
   names: Names;
@@ -54,6 +56,8 @@ const atPointer: Modifier = ({ active, activatorEvent, draggingNodeRect, transfo
   return { ...transform, x: transform.x + activatorEvent.clientX - draggingNodeRect.left + 14, y: transform.y + activatorEvent.clientY - draggingNodeRect.top - 14 };
 };
 
+/** Enter stays free to pick a card or unfold it. */
+const DRAG_KEYS = { start: [KeyboardCode.Space], cancel: [KeyboardCode.Esc], end: [KeyboardCode.Space, KeyboardCode.Enter, KeyboardCode.Tab] };
 const NO_JACKS: readonly PlacedJack[] = [];
 const NO_KNOBS: Patch["knobs"] = [];
 
@@ -62,8 +66,8 @@ export const BoardCanvas = memo(function BoardCanvas(props: BoardCanvasProps) {
   const { cards, layout, scale, patch, check, names, chain, canEdit } = props;
   const [dragged, setDragged] = useState<string | null>(null);
   const contextId = useId();
-  const sensors = useSensors(useSensor(PointerSensor, { activationConstraint: { distance: 6 } }), useSensor(KeyboardSensor, { coordinateGetter: sortableKeyboardCoordinates }));
-  const metrics = scaledMetrics(scale);
+  const sensors = useSensors(useSensor(PointerSensor, { activationConstraint: { distance: 6 } }), useSensor(KeyboardSensor, { coordinateGetter: sortableKeyboardCoordinates, keyboardCodes: DRAG_KEYS }));
+  const metrics = scaledMetrics(scale, props.isCompact);
   const footHeight = FOOT_HEIGHT * scale;
 
   const jacksOf = useMemo(() => {
@@ -125,7 +129,7 @@ export const BoardCanvas = memo(function BoardCanvas(props: BoardCanvasProps) {
       id={contextId}
       sensors={sensors}
       collisionDetection={collide}
-      accessibility={{ announcements, screenReaderInstructions: { draggable: "Space picks the card up; arrow keys move it within its lane; Space puts it down, Escape puts it back." } }}
+      accessibility={{ announcements, screenReaderInstructions: { draggable: "Enter brings the card's chain forward, or unfolds it. Space picks the card up; arrow keys move it within its lane; Space puts it down, Escape puts it back." } }}
       onDragStart={onDragStart}
       onDragEnd={onDragEnd}
       onDragCancel={() => setDragged(null)}
@@ -176,10 +180,11 @@ export const BoardCanvas = memo(function BoardCanvas(props: BoardCanvasProps) {
                   key={`${tag.end}:${tag.jackId}`}
                   tag={tag}
                   leads={leads}
-                  check={check.leads[first.id]}
+                  check={worstOf(leads, check)}
                   label={tag.end === "in" ? `${names.jack(first.outputId)} to ${names.jack(first.inputId)}` : `at ${names.jack(first.outputId)}`}
                   isDim={chain !== null && !leads.some((lead) => chain.leadIds.has(lead.id))}
-                  isPicked={leads.some((lead) => lead.id === props.pickedLeadId)}
+                  pickedLeadId={leads.some((lead) => lead.id === props.pickedLeadId) ? props.pickedLeadId : null}
+                  showsVolts={!props.isCompact}
                   canEdit={canEdit}
                   onPick={props.onPickLead}
                   onUnplug={props.onUnplug}
@@ -195,3 +200,8 @@ export const BoardCanvas = memo(function BoardCanvas(props: BoardCanvasProps) {
     </DndContext>
   );
 });
+
+/** The worst of leads that share a jack: no tag may look better than a lead it stands for. */
+function worstOf(leads: readonly Lead[], check: PatchCheck): LeadCheck | undefined {
+  return leads.map((lead) => check.leads[lead.id]).filter((lead) => lead !== undefined).sort((a, b) => severityOf(b.verdict) - severityOf(a.verdict))[0];
+}

@@ -36,13 +36,13 @@ export const BoardCard = memo(function BoardCard({ gear, box, jacks, plugged, kn
       ref={setNodeRef}
       data-card={gear.id}
       style={{ left: box.x, top: box.y, width: box.width, height: box.height, transform: CSS.Translate.toString(transform), transition: transition }}
-      className={clsx("absolute bg-bench", !isPicked && "border-b-2 border-line-soft", isPicked && "outline-3 outline-mark", isDim && "opacity-65", isDragging && "opacity-40")}
+      className={clsx("absolute bg-bench", !isPicked && "border-b-2 border-line-soft", isPicked && "outline-3 outline-mark", isDim && "opacity-65", isDragging && "opacity-40", "has-[>.tape:focus-visible]:z-[2]")}
     >
       <button
         type="button"
         ref={setActivatorNodeRef}
-        {...attributes}
-        {...listeners}
+        {...(canEdit ? attributes : {})}
+        {...(canEdit ? listeners : {})}
         aria-roledescription="card"
         aria-disabled={undefined}
         onClick={() => onPick(gear.id)}

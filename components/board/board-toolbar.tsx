@@ -23,6 +23,9 @@ interface BoardToolbarProps {
   filter: string;
   onFilter: (text: string) => void;
   onTidy: () => void;
+  onUndo: () => void;
+  onRedo: () => void;
+  onAsk: () => void;
 }
 
 /** What can be done with the whole board, and how its leads stand. */
@@ -34,8 +37,8 @@ export function BoardToolbar(props: BoardToolbarProps) {
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
         {canEdit ? (
           <>
-            <Button onClick={editor.undo} disabled={!editor.canUndo} title="Ctrl+Z">Undo</Button>
-            <Button onClick={editor.redo} disabled={!editor.canRedo} title="Ctrl+Shift+Z">Redo</Button>
+            <Button onClick={props.onUndo} disabled={!editor.canUndo} title="Ctrl+Z">Undo</Button>
+            <Button onClick={props.onRedo} disabled={!editor.canRedo} title="Ctrl+Shift+Z">Redo</Button>
             {isNarrow ? null : <Button onClick={props.onTidy} title="Order the cards so that leads cross less">Tidy</Button>}
           </>
         ) : <span className="font-semibold">You can look and print; a collaborator or the performer edits.</span>}
@@ -51,7 +54,7 @@ export function BoardToolbar(props: BoardToolbarProps) {
             ) : null}
           </>
         )}
-        <span className="ml-auto">{canEdit ? <SaveStatus state={editor.state} revision={editor.revision} onRetry={() => void editor.saveNow()} /> : null}</span>
+        <span className="ml-auto">{canEdit ? <SaveStatus state={editor.state} revision={editor.revision} onRetry={() => void editor.saveNow()} onAsk={props.onAsk} /> : null}</span>
       </div>
       <div className="flex flex-wrap items-center gap-x-5 gap-y-1" aria-live="polite" aria-busy={props.isChecking}>
         {counts.map((verdict) => (

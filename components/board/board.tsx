@@ -1,6 +1,6 @@
 "use client";
 import { arrayMove } from "@dnd-kit/sortable";
-import { useCallback, useEffect, useMemo, useState } from "react";
+import { useCallback, useEffect, useMemo, useRef, useState } from "react";
 import { leadChain, tidyLanes } from "@/lib/core/chart";
 import type { PatchCheck } from "@/lib/core/electrics/patch-types";
 import type { Can } from "@/lib/rights/can";
@@ -8,7 +8,6 @@ import type { Gear } from "@/lib/schemas/gear";
 import { laneOf } from "@/lib/schemas/lane-of";
 import type { Lead, Patch } from "@/lib/schemas/patch";
 import { useAnnounce } from "../ui/announcer";
-import { Button } from "../ui/button";
 import { Notice } from "../ui/notice";
 import { BoardCanvas } from "./board-canvas";
 import { PluggingContext, type Plugging } from "./board-context";
@@ -18,10 +17,12 @@ import { ConflictDialog } from "./conflict-dialog";
 import { namesOf } from "./describe-changes";
 import { findGone } from "./find-gone";
 import { FirstRun } from "./first-run";
+import { GoneNotice } from "./gone-notice";
 import { KnobDialog } from "./knob-dialog";
 import { LeadPanel } from "./lead-panel";
 import { PlugDialog } from "./plug-dialog";
 import { RunList } from "./run-list";
+import { JackList, KnobList } from "./tap-lists";
 import { useBoardKeys } from "./use-board-keys";
 import { useBoardLayout } from "./use-board-layout";
 import { useFrameWidth } from "./use-frame-width";
@@ -62,6 +63,7 @@ export function Board(props: BoardProps) {
   const [foldsFree, setFoldsFree] = useState(props.patch.leads.length > 0 && gear.length > MANY_CARDS);
   const [unfolded, setUnfolded] = useState<ReadonlySet<string>>(new Set());
   const [filter, setFilter] = useState("");
+  const [putOff, setPutOff] = useState<number | null>(null);
   const [frameRef, frameWidth] = useFrameWidth();
   const isNarrow = frameWidth > 0 && frameWidth < NARROW_PX;
   const showsRuns = view === "runs" || isNarrow;
@@ -73,7 +75,7 @@ export function Board(props: BoardProps) {
     return wanted === "" ? cards : cards.filter((card) => used.has(card.id) || card.name.toLowerCase().includes(wanted));
   }, [cards, filter, used]);
   const folded = useMemo(() => new Set(foldsFree && filter === "" ? shown.filter((card) => !used.has(card.id) && !unfolded.has(card.id)).map((card) => card.id) : []), [filter, foldsFree, shown, unfolded, used]);
-  const { layout, scale } = useBoardLayout(shown, patch.leads, folded, frameWidth, fits);
+  const { layout, scale, isCompact } = useBoardLayout(shown, patch.leads, folded, frameWidth, fits);
   const chain = useMemo(() => {
     const picked = { leadIds: pickedLeadId ? [pickedLeadId] : [], cardIds: pickedCardId ? [pickedCardId] : [] };
     if (!pickedLeadId && !pickedCardId) return null;
@@ -95,11 +97,16 @@ export function Board(props: BoardProps) {
     setListFrom(null);
   }, [announce, edit, jacks, names]);
 
+  // The jack that takes the focus over from a tag or panel that goes with its lead.
+  const refocus = useRef<string | null>(null);
+  const frame = useRef<HTMLDivElement>(null);
   const unplug = useCallback((leadIds: readonly string[]) => {
     if (leadIds.length === 0) return;
+    const held = document.activeElement?.closest("[data-lead-panel-frame], [data-tag-of]");
+    if (held) refocus.current = patch.leads.find((lead) => lead.id === leadIds[0])?.inputId ?? null;
     edit({ type: "unplug", leadIds });
     announce(`${leadIds.length === 1 ? "Lead" : `${leadIds.length} leads`} unplugged. Control Z brings it back.`);
-  }, [announce, edit]);
+  }, [announce, edit, patch.leads]);
 
   const tap = useCallback((jackId: string) => {
     setArmed((before) => {
@@ -159,12 +166,37 @@ export function Board(props: BoardProps) {
     announce("Cards put in the order in which their leads cross least.");
   }, [announce, cards, edit, patch.leads]);
 
-  useBoardKeys({ onUndo: editor.undo, onRedo: editor.redo, onRuns: () => setView((before) => (before === "runs" ? "board" : "runs")), onEscape: letGo });
+  const { undo: takeBack, redo: doAgain, canUndo, canRedo } = editor;
+  const undo = useCallback(() => {
+    if (!canUndo) return;
+    takeBack();
+    announce("Undone.");
+  }, [announce, canUndo, takeBack]);
+  const redo = useCallback(() => {
+    if (!canRedo) return;
+    doAgain();
+    announce("Done again.");
+  }, [announce, canRedo, doAgain]);
+  const closePanel = useCallback(() => {
+    if (pickedLeadId) document.querySelector<HTMLElement>(`[data-tag-of~="${CSS.escape(pickedLeadId)}"]`)?.focus({ preventScroll: true });
+    setPickedLeadId(null);
+  }, [pickedLeadId]);
+
+  useBoardKeys({ onUndo: undo, onRedo: redo, onRuns: () => setView((before) => (before === "runs" ? "board" : "runs")), onEscape: letGo });
   useEffect(() => {
     if (!pickedLeadId) return;
     document.querySelector<HTMLElement>("[data-lead-panel]")?.focus({ preventScroll: true });
     document.querySelector<HTMLElement>("[data-lead-tag][data-picked]")?.scrollIntoView({ block: "nearest" });
   }, [pickedLeadId]);
+
+  useEffect(() => {
+    const jackId = refocus.current;
+    refocus.current = null;
+    if (jackId === null || document.activeElement !== document.body) return;
+    const jack = document.querySelector<HTMLElement>(`[data-jack="${CSS.escape(jackId)}"]`);
+    const card = jacks.get(jackId)?.gear.id;
+    (jack ?? document.querySelector<HTMLElement>(`[data-card="${CSS.escape(card ?? "")}"] > .tape`) ?? frame.current)?.focus({ preventScroll: true });
+  }, [jacks, patch.leads]);
 
   const leadLabel = useCallback((lead: Lead) => `${names.jack(lead.outputId)} → ${names.jack(lead.inputId)}`, [names]);
   const gearName = useCallback((id: string) => gear.find((item) => item.id === id)?.name ?? "?", [gear]);
@@ -184,32 +216,24 @@ export function Board(props: BoardProps) {
             setFoldsFree(folds);
             setUnfolded(new Set());
           }}
-          filter={filter} onFilter={setFilter} onTidy={tidy}
+          filter={filter} onFilter={setFilter} onTidy={tidy} onUndo={undo} onRedo={redo} onAsk={() => setPutOff(null)}
         />
         {failed ? <Notice tone="error" title="Not checked" live className="mb-3">The server did not answer the check. The verdicts shown are from before; they follow with the next change.</Notice> : null}
-        {gone ? (
-          <Notice tone="caution" title="Something in this song is gone from its box" className="mb-3">
-            <p className="mb-2">
-              {gone.leadNumbers.length > 0 ? `Lead ${gone.leadNumbers.join(", ")} ended at a jack that the gear no longer has. ` : ""}
-              {gone.knobs > 0 ? "A knob that was set here is no longer on its box. " : ""}
-              Until it is cleared, changes to this song cannot be saved.
-            </p>
-            {canEdit ? <Button onClick={() => edit({ type: "replace", patch: gone.patch })}>Clear what is gone</Button> : null}
-          </Notice>
-        ) : null}
+        {gone ? <GoneNotice gone={gone} onClear={canEdit ? () => edit({ type: "replace", patch: gone.patch }) : undefined} /> : null}
         {editor.news ? <Notice tone="done" live className="mb-3">{editor.news} <button type="button" className="underline" onClick={editor.dismissNews}>Good</button></Notice> : null}
         {armed ? <p role="status" className="fixed bottom-4 left-1/2 z-10 max-w-[90vw] -translate-x-1/2 border-2 border-ink border-l-8 border-l-mark bg-bench px-3 py-1.5 shadow-lg"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
         <div ref={frameRef} className="w-full">
-          {cards.length === 0 || (patch.leads.length === 0 && canEdit) ? <FirstRun rigId={rigId} gear={gear} can={can} /> : null}
+          {cards.length === 0 || (patch.leads.length === 0 && canEdit) ? <FirstRun rigId={rigId} gear={gear} can={can} onPlug={plug} /> : null}
           {cards.length === 0 ? null : showsRuns ? (
             <div className="flex flex-col gap-5">
-              {isNarrow && canEdit ? <JackList cards={cards} armed={armed} onOpen={setListFrom} /> : null}
+              {isNarrow && canEdit ? <JackList cards={cards} onOpen={setListFrom} /> : null}
+              {isNarrow ? <KnobList cards={cards} used={used} knobs={patch.knobs} onOpen={setKnobsOf} /> : null}
               <RunList check={check} leads={patch.leads} gearName={gearName} leadLabel={leadLabel} pickedLeadId={pickedLeadId} onPick={pickLead} />
             </div>
           ) : (
-            <div className="overflow-x-auto overflow-y-hidden pb-3" tabIndex={-1}>
+            <div ref={frame} className="group/board -mx-2 overflow-x-auto px-2 overflow-y-hidden pb-3" tabIndex={-1} data-checking={isChecking || undefined}>
               <BoardCanvas
-                cards={shown} layout={layout} scale={scale} patch={patch} check={check} names={names} chain={chain} pickedLeadId={pickedLeadId} pickedCardId={pickedCardId} canEdit={canEdit}
+                cards={shown} layout={layout} scale={scale} isCompact={isCompact} patch={patch} check={check} names={names} chain={chain} pickedLeadId={pickedLeadId} pickedCardId={pickedCardId} canEdit={canEdit}
                 onPickLead={pickLead} onPickCard={pickCard} onKnobs={setKnobsOf} onUnplug={unplug} onJackDrag={setArmed} onPlug={plug} onMoveEnd={moveEnd} onMoveCard={moveCard}
               />
             </div>
@@ -218,33 +242,20 @@ export function Board(props: BoardProps) {
       </div>
       {picked ? (
         <LeadPanel
-          lead={picked} from={names.jack(picked.outputId)} to={names.jack(picked.inputId)} check={check.leads[picked.id]} isChecking={isChecking}
-          input={inputFigures(jacks.get(picked.inputId)?.jack)} canEdit={canEdit} edit={edit} onClose={() => setPickedLeadId(null)}
+          rigId={rigId} gear={gear} lead={picked} from={names.jack(picked.outputId)} to={names.jack(picked.inputId)} check={check.leads[picked.id]} isChecking={isChecking}
+          input={inputFigures(jacks.get(picked.inputId)?.jack)} canEdit={canEdit} edit={edit} onUnplug={unplug} onClose={closePanel}
         />
       ) : null}
       <PlugDialog title={listFrom === null ? null : `Plug ${names.jack(listFrom)} into…`} choices={choices} would={candidates.would} isLoading={candidates.isLoading} onChoose={(jackId) => listFrom !== null && plug(listFrom, jackId)} onClose={() => setListFrom(null)} />
       <KnobDialog gear={gear.find((item) => item.id === knobsOf) ?? null} knobs={patch.knobs} canEdit={canEdit} edit={edit} onClose={() => setKnobsOf(null)} />
-      <ConflictDialog conflict={editor.conflict} names={names} onSettle={editor.settle} />
+      <ConflictDialog
+        conflict={editor.conflict} isOpen={editor.conflict?.theirs.revision !== putOff} names={names} onSettle={editor.settle}
+        onPutOff={() => setPutOff(editor.conflict?.theirs.revision ?? null)}
+      />
     </PluggingContext.Provider>
   );
 }
 
 function inputFigures(jack: Gear["jacks"][number] | undefined) {
   return jack?.direction === "input" ? jack.input : undefined;
-}
-
-/** On a phone: every output with a way to plug it, since there is no board to tap on. */
-function JackList({ cards, armed, onOpen }: { cards: readonly Gear[]; armed: string | null; onOpen: (jackId: string) => void }) {
-  return (
-    <details className="bg-bench p-3" open={armed !== null}>
-      <summary className="min-h-11 py-2 font-bold">Plug a lead</summary>
-      <ul className="flex flex-col">
-        {cards.flatMap((card) => card.jacks.filter((jack) => jack.direction === "output").map((jack) => (
-          <li key={jack.id}>
-            <button type="button" className="flex min-h-12 w-full items-center border-t border-line-soft px-1 text-left" onClick={() => onOpen(jack.id)}>{card.name} · {jack.name} →</button>
-          </li>
-        )))}
-      </ul>
-    </details>
-  );
 }

@@ -1,6 +1,6 @@
 "use client";
 import { useRouter } from "next/navigation";
-import { useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { fetchJson, ProblemError } from "@/lib/client/fetch-json";
 import { startingGear, startingVariants } from "@/lib/core/electrics/starting-figures";
 import { paths } from "@/lib/paths";
@@ -9,6 +9,7 @@ import type { Gear } from "@/lib/schemas/gear";
 import { Button } from "../ui/button";
 import { EmptyState } from "../ui/empty-state";
 import { Notice } from "../ui/notice";
+import { firstLeads } from "./first-leads";
 
 const QUESTIONS = [
   { kind: "pad", question: "What do you hit?" },
@@ -16,13 +17,27 @@ const QUESTIONS = [
   { kind: "voice", question: "What should sound?" },
 ] as const;
 
-/** One question at a time, each answered by gear with starting figures, until a first run can be plugged; then how to plug it. */
-export function FirstRun({ rigId, gear, can }: { rigId: string; gear: readonly Gear[]; can: Can }) {
+interface FirstRunProps {
+  rigId: string;
+  gear: readonly Gear[];
+  can: Can;
+  onPlug: (outputId: string, inputId: string) => void;
+}
+
+/** One question at a time, each answered by gear with starting figures; after the last the run is plugged. Where the gear was there before: how to plug it. */
+export function FirstRun({ rigId, gear, can, onPlug }: FirstRunProps) {
   const router = useRouter();
   const [busy, setBusy] = useState(false);
   const [refusal, setRefusal] = useState<string | null>(null);
   const missing = QUESTIONS.findIndex(({ kind }) => !gear.some((item) => item.kind === kind));
   const next = QUESTIONS[missing];
+  const answeredHere = useRef(false);
+
+  useEffect(() => {
+    if (missing >= 0 || !answeredHere.current) return;
+    answeredHere.current = false;
+    for (const [outputId, inputId] of firstLeads(gear)) onPlug(outputId, inputId);
+  }, [gear, missing, onPlug]);
 
   if (!next) {
     return (
@@ -40,6 +55,7 @@ export function FirstRun({ rigId, gear, can }: { rigId: string; gear: readonly G
     setRefusal(null);
     try {
       await fetchJson(paths.api.gearList(rigId), { body: startingGear(kind, variant, () => crypto.randomUUID()) });
+      answeredHere.current = true;
       router.refresh();
     } catch (error) {
       if (!(error instanceof ProblemError)) throw error;
@@ -61,7 +77,7 @@ export function FirstRun({ rigId, gear, can }: { rigId: string; gear: readonly G
           </ul>
         }
       >
-        It comes with figures to start from, marked as assumed until you measure your own. Name and figures can be changed under Gear.
+        After the third the run is plugged, and its verdicts say what to measure first. Each comes with figures to start from, marked as assumed until you measure your own. Name and figures can be changed under Gear.
       </EmptyState>
       {refusal ? <Notice tone="error" live>{refusal}</Notice> : null}
     </div>

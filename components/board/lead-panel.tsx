@@ -1,4 +1,5 @@
 "use client";
+import Link from "next/link";
 import { useId } from "react";
 import { formatQuantity, formatRange } from "@/lib/core/units/format-quantity";
 import { VerdictWord } from "../chart/verdict-word";
@@ -7,13 +8,18 @@ import { Select, TextInput } from "../ui/inputs";
 import { Notice } from "../ui/notice";
 import type { Fix } from "@/lib/core/electrics/connection-types";
 import type { LeadCheck } from "@/lib/core/electrics/patch-types";
+import { paths } from "@/lib/paths";
+import type { Gear } from "@/lib/schemas/gear";
 import type { InputJack } from "@/lib/schemas/jack";
 import { LEAD_COLOURS, type Lead } from "@/lib/schemas/patch";
+import { describeFigures } from "./describe-figures";
 import { describeInline, inlineOf } from "./describe-inline";
 import { LevelPlot } from "./level-plot";
 import type { PatchEdit } from "./patch-reducer";
 
 interface LeadPanelProps {
+  rigId: string;
+  gear: readonly Gear[];
   lead: Lead;
   from: string;
   to: string;
@@ -22,11 +28,12 @@ interface LeadPanelProps {
   input: InputJack["input"] | undefined;
   canEdit: boolean;
   edit: (edit: PatchEdit) => void;
+  onUnplug: (leadIds: readonly string[]) => void;
   onClose: () => void;
 }
 
 /** What the server says of one lead: verdict, sentences, numbers, and what would mend it. */
-export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, edit, onClose }: LeadPanelProps) {
+export function LeadPanel({ rigId, gear, lead, from, to, check, isChecking, input, canEdit, edit, onUnplug, onClose }: LeadPanelProps) {
   const id = useId();
   return (
     <section
@@ -35,6 +42,7 @@ export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, e
         if (event.key === "Escape") onClose();
       }}
       className="fixed inset-x-0 bottom-0 z-20 max-h-[48dvh] overflow-y-auto border-t-4 border-ink bg-bench px-4 py-4 md:px-6"
+      data-lead-panel-frame
       data-print="hide"
     >
       <div className="mb-3 flex flex-wrap items-start justify-between gap-3">
@@ -45,7 +53,7 @@ export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, e
         <div className="flex flex-wrap items-center gap-3">
           {check ? <VerdictWord verdict={check.verdict} className="text-xl" /> : null}
           {isChecking ? <span className="text-ink-soft">checking…</span> : null}
-          {canEdit ? <Button tone="danger" onClick={() => edit({ type: "unplug", leadIds: [lead.id] })}>Unplug</Button> : null}
+          {canEdit ? <Button tone="danger" onClick={() => onUnplug([lead.id])}>Unplug</Button> : null}
           <Button onClick={onClose}>Close</Button>
         </div>
       </div>
@@ -58,7 +66,8 @@ export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, e
           </ul>
           {check?.cautions.map((caution) => <Notice key={caution.text} tone="caution">{caution.text}</Notice>)}
           {lead.inline ? <p>In this lead: {describeInline(lead.inline)}.</p> : null}
-          {check && check.assumed.length > 0 ? <p className="text-ink-soft">* Leans on {check.assumed.length} assumed {check.assumed.length === 1 ? "figure" : "figures"}.{check.nextMeasurement ? ` Measure next: ${check.nextMeasurement.text}` : ""}</p> : null}
+          {check?.nextMeasurement ? <p><strong>Measure next:</strong> {check.nextMeasurement.text}</p> : null}
+          {check && check.assumed.length > 0 ? <Assumed keys={check.assumed} gear={gear} rigId={rigId} /> : null}
         </div>
         <div className="flex flex-col gap-3">
           {check ? <LevelPlot check={check} input={input} /> : null}
@@ -70,6 +79,20 @@ export function LeadPanel({ lead, from, to, check, isChecking, input, canEdit, e
         </div>
       </div>
     </section>
+  );
+}
+
+/** Which figures nobody has measured yet, box by box, each box a way to go and put its reading in. */
+function Assumed({ keys, gear, rigId }: { keys: readonly string[]; gear: readonly Gear[]; rigId: string }) {
+  return (
+    <details>
+      <summary className="min-h-9 py-1 text-ink-soft underline">* Leans on {keys.length} assumed {keys.length === 1 ? "figure" : "figures"}</summary>
+      <ul className="flex flex-col gap-1">
+        {describeFigures(keys, gear).map((box) => (
+          <li key={box.gearId}><Link href={paths.gear(rigId, box.gearId)} className="font-semibold underline">{box.gearName}</Link>: {box.figures.join("; ")}</li>
+        ))}
+      </ul>
+    </details>
   );
 }
 
@@ -110,14 +133,21 @@ function Fixes({ lead, check, canEdit, edit }: { lead: Lead; check: LeadCheck | 
 }
 
 function FixItem({ fix, lead, canEdit, edit }: { fix: Fix; lead: Lead; canEdit: boolean; edit: (edit: PatchEdit) => void }) {
-  const inline = inlineOf(fix);
+  const use = editOf(fix, lead.id);
   return (
     <li className="flex flex-col items-start gap-1.5 border-l-4 border-line pl-3">
       <span>{fix.text}</span>
       <span className="flex items-center gap-2">checked: <VerdictWord verdict={fix.verdict} /></span>
-      {inline && canEdit ? <Button tone="primary" onClick={() => edit({ type: "inline", leadId: lead.id, inline })}>Use this fix</Button> : null}
+      {use && canEdit ? <Button tone="primary" onClick={() => edit(use)}>Use this fix</Button> : null}
     </li>
   );
+}
+
+/** The edit that puts a fix into this song's patch; null where it asks for something outside it, as another part in a box. */
+function editOf(fix: Fix, leadId: string): PatchEdit | null {
+  if ("through" in fix && fix.through) return { type: "through", leadId, newId: crypto.randomUUID(), ...fix.through };
+  const inline = inlineOf(fix);
+  return inline && { type: "inline", leadId, inline };
 }
 
 function LeadFields({ lead, edit }: { lead: Lead; edit: (edit: PatchEdit) => void }) {
@@ -129,6 +159,9 @@ function LeadFields({ lead, edit }: { lead: Lead; edit: (edit: PatchEdit) => voi
         <TextInput
           id={`${id}-number`} type="number" min={1} max={999} defaultValue={lead.number}
           onBlur={(event) => edit({ type: "renumber", leadId: lead.id, number: event.target.valueAsNumber })}
+          onKeyDown={(event) => {
+            if (event.key === "Enter") edit({ type: "renumber", leadId: lead.id, number: event.currentTarget.valueAsNumber });
+          }}
         />
       </div>
       <div className="flex w-36 flex-col gap-1">

@@ -7,6 +7,7 @@ export type PatchEdit =
   | { type: "renumber"; leadId: string; number: number }
   | { type: "recolour"; leadId: string; colour: Lead["colour"] }
   | { type: "inline"; leadId: string; inline: Inline | null }
+  | { type: "through"; leadId: string; newId: string; inputId: string; outputId: string }
   | { type: "knob"; gearId: string; knobId: string; position: number | null }
   | { type: "lanes"; lanes: Patch["lanes"] }
   | { type: "replace"; patch: Patch };
@@ -61,6 +62,7 @@ export function editPatch(patch: Patch, edit: PatchEdit): Patch {
     case "renumber": return renumber(patch, edit.leadId, edit.number);
     case "recolour": return changeLead(patch, edit.leadId, (lead) => ({ ...lead, colour: edit.colour }));
     case "inline": return changeLead(patch, edit.leadId, ({ inline: _before, ...lead }) => (edit.inline ? { ...lead, inline: edit.inline } : lead));
+    case "through": return leadThrough(patch, edit);
     case "knob": return turnKnob(patch, edit.gearId, edit.knobId, edit.position);
     case "lanes": return { ...patch, lanes: edit.lanes };
     case "replace": return edit.patch;
@@ -84,6 +86,16 @@ export function lowestFreeNumber(patch: Patch): number {
 function unplug(patch: Patch, leadIds: ReadonlySet<string>): Patch {
   const leads = patch.leads.filter((lead) => !leadIds.has(lead.id));
   return leads.length === patch.leads.length ? patch : { ...patch, leads };
+}
+
+/** Leads a lead through a box: it ends at the box's input, and a new lead goes on from the box's output to where it ended. */
+function leadThrough(patch: Patch, { leadId, newId, inputId, outputId }: { leadId: string; newId: string; inputId: string; outputId: string }): Patch {
+  const lead = patch.leads.find((item) => item.id === leadId);
+  if (!lead) return patch;
+  const { inline: _parts, ...rest } = lead;
+  const isThere = patch.leads.some((item) => item.id !== leadId && item.outputId === lead.outputId && item.inputId === inputId);
+  const turned = { ...patch, leads: patch.leads.flatMap((item) => (item.id !== leadId ? [item] : isThere ? [] : [{ ...rest, inputId }])) };
+  return plug(turned, { id: newId, outputId, inputId: lead.inputId });
 }
 
 /** A number another lead has is swapped with it, since two leads never carry one number. */

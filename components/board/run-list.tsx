@@ -36,6 +36,7 @@ export function RunList({ check, leads, gearName, leadLabel, pickedLeadId, onPic
                 <li key={id}>
                   <button
                     type="button"
+                    data-tag-of={id}
                     onClick={() => onPick(id)}
                     aria-current={pickedLeadId === id ? "true" : undefined}
                     className={`flex min-h-11 w-full flex-wrap items-center gap-x-3 gap-y-0.5 border-t border-line-soft px-1 py-1 text-left hover:bg-raised ${pickedLeadId === id ? "border-l-8 border-l-ink bg-raised" : ""}`}

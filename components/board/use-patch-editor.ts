@@ -1,5 +1,5 @@
 "use client";
-import { useCallback, useEffect, useReducer, useRef, useState } from "react";
+import { useCallback, useEffect, useMemo, useReducer, useRef, useState } from "react";
 import { fetchJson, ProblemError } from "@/lib/client/fetch-json";
 import { paths } from "@/lib/paths";
 import type { Patch } from "@/lib/schemas/patch";
@@ -8,7 +8,7 @@ import { dropPatchDraft, readPatchDraft, writePatchDraft } from "./patch-draft";
 import { reduceHistory, startHistory, type HistoryAction, type PatchEdit } from "./patch-reducer";
 
 export type SaveState =
-  | { status: "saved" | "waiting" | "saving" }
+  | { status: "saved" | "waiting" | "saving" | "asking" }
   | { status: "offline"; detail: string }
   | { status: "refused"; detail: string };
 
@@ -19,8 +19,9 @@ interface Saved {
 
 export interface OpenConflict {
   merge: Merge;
-  /** What both began from. */
+  /** What both began from, what stands on this screen, and what they saved. */
   base: Patch;
+  mine: Patch;
   theirs: Saved;
 }
 
@@ -33,7 +34,7 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   const [history, dispatch] = useReducer(reduceHistory, initial.patch, startHistory);
   const [saved, setSaved] = useState<Saved>(initial);
   const [state, setState] = useState<SaveState>({ status: "saved" });
-  const [conflict, setConflict] = useState<OpenConflict | null>(null);
+  const [clash, setClash] = useState<{ base: Patch; theirs: Saved } | null>(null);
   const [news, setNews] = useState<string | null>(null);
   const [retry, setRetry] = useState(0);
   const savedRef = useRef(saved);
@@ -41,6 +42,8 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   const busy = useRef(false);
   const url = paths.api.patch(rigId, songId);
   const { present } = history;
+  // Merged anew at every edit, since the question can be put off and edited on.
+  const conflict = useMemo((): OpenConflict | null => clash && { ...clash, mine: present, merge: mergePatches(clash.base, present, clash.theirs.patch) }, [clash, present]);
 
   useEffect(() => {
     savedRef.current = saved;
@@ -53,14 +56,17 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   }, []);
 
   /** Takes another's save in: by itself where nothing conflicts, else by asking. */
-  const takeIn = useCallback((base: Patch, mine: Patch, theirs: Saved) => {
-    const merge = mergePatches(base, mine, theirs.patch);
+  const takeIn = useCallback((base: Saved, mine: Patch, theirs: Saved) => {
+    const merge = mergePatches(base.patch, mine, theirs.patch);
     if (merge.conflicts.length > 0) {
-      setConflict({ merge, base, theirs });
+      // Until it is settled the draft keeps what it began from, so that a closed tab asks again.
+      noteSaved(base);
+      setClash({ base: base.patch, theirs });
+      if (presentRef.current !== mine) dispatch({ type: "replace", patch: mine });
       return;
     }
     noteSaved(theirs);
-    dispatch({ type: "rebase", base, theirs: theirs.patch, present: merge.patch });
+    dispatch({ type: "rebase", base: base.patch, theirs: theirs.patch, present: merge.patch });
     setNews("Somebody else saved this song too. Both their changes and yours are here.");
   }, [noteSaved]);
 
@@ -68,7 +74,7 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
     if (busy.current) return;
     busy.current = true;
     const [base, patch] = [savedRef.current, presentRef.current];
-    setState({ status: "saving" });
+    setState((before) => (before.status === "offline" ? before : { status: "saving" }));
     try {
       const { revision } = await fetchJson<{ revision: number }>(url, { method: "PUT", body: { baseRevision: base.revision, patch } });
       noteSaved({ revision, patch });
@@ -79,7 +85,7 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
       const current = error.status === 409 ? (error.problem.current as Saved | undefined) : undefined;
       if (current) {
         setState({ status: "waiting" });
-        takeIn(base.patch, presentRef.current, current);
+        takeIn(base, presentRef.current, current);
       } else if (error.status === 0 || error.status >= 500) {
         setState({ status: "offline", detail: error.problem.detail });
         setTimeout(() => setRetry((count) => count + 1), RETRY_MS);
@@ -100,7 +106,7 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
       else if (draft.baseRevision === initial.revision) {
         dispatch({ type: "replace", patch: draft.patch });
         setNews("Changes from your last visit had not been saved. They are back.");
-      } else takeIn(draft.base, draft.patch, initial);
+      } else takeIn({ revision: draft.baseRevision, patch: draft.base }, draft.patch, initial);
     }, 0);
     return () => clearTimeout(restoring);
     // Only once, with what the page was opened with.
@@ -108,11 +114,12 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   }, []);
 
   useEffect(() => {
-    if (!canEdit || conflict || same(present, saved.patch)) return;
+    if (!canEdit || same(present, saved.patch)) return;
     writePatchDraft(songId, { baseRevision: saved.revision, base: saved.patch, patch: present });
+    if (clash) return;
     const timer = setTimeout(() => void save(), QUIET_MS);
     return () => clearTimeout(timer);
-  }, [canEdit, conflict, present, retry, save, saved, songId]);
+  }, [canEdit, clash, present, retry, save, saved, songId]);
 
   // A closing tab sends what the quiet half second still held back.
   useEffect(() => {
@@ -133,7 +140,7 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
     if (!conflict) return;
     const patch = settleConflicts(conflict.merge, takeMine);
     noteSaved(conflict.theirs);
-    setConflict(null);
+    setClash(null);
     if (same(patch, conflict.theirs.patch)) {
       dropPatchDraft(songId);
       setState({ status: "saved" });
@@ -141,11 +148,19 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
     dispatch({ type: "rebase", base: conflict.base, theirs: conflict.theirs.patch, present: patch });
   }, [conflict, noteSaved, songId]);
 
+  // Undoing one's own side of it leaves nothing to ask.
+  const isSettled = conflict !== null && conflict.merge.conflicts.length === 0;
+  useEffect(() => {
+    if (!isSettled) return;
+    const settling = setTimeout(() => settle(new Set()), 0);
+    return () => clearTimeout(settling);
+  }, [isSettled, settle]);
+
   const isDirty = !same(present, saved.patch);
   return {
     patch: present,
     revision: saved.revision,
-    state: isDirty && state.status === "saved" ? { status: "waiting" as const } : !isDirty && state.status === "waiting" ? { status: "saved" as const } : state,
+    state: clash ? { status: "asking" as const } : isDirty && state.status === "saved" ? { status: "waiting" as const } : !isDirty && state.status === "waiting" ? { status: "saved" as const } : state,
     edit: act as (edit: PatchEdit) => void,
     undo: useCallback(() => act({ type: "undo" }), [act]),
     redo: useCallback(() => act({ type: "redo" }), [act]),

@@ -66,6 +66,50 @@ test.describe("the board", () => {
     await saved(page);
   });
 
+  test("cards are unfolded and picked by key, and the focus stays where the work is", async ({ page }) => {
+    const song = await newSong(page.request, "By key", "wet-chalk");
+    await page.goto(`${RIG}/songs/${song}`);
+    const focused = () => page.evaluate(() => document.activeElement?.getAttribute("data-jack") ?? document.activeElement?.getAttribute("data-lead-tag"));
+    await expect(page.locator("[data-jack=pad-snare-out]")).toHaveCount(0);
+    await page.locator("[data-card=pad-snare] > .tape").press("Enter");
+    await expect(page.locator("[data-jack=pad-snare-out]")).toBeVisible();
+    // The mark of the focus is not cut off by the tape's torn edge.
+    expect(await page.locator("[data-card=pad-snare] > .tape").evaluate((tape) => getComputedStyle(tape).clipPath)).toBe("none");
+
+    const lead = page.locator("[data-lead-tag=wet-chalk-2]");
+    await lead.press("Enter");
+    await expect(page.getByRole("region", { name: /^Lead 2/ })).toBeVisible();
+    await page.keyboard.press("Escape");
+    expect(await focused()).toBe("wet-chalk-2");
+    await page.keyboard.press("Delete");
+    await expect(lead).toHaveCount(0);
+    await expect.poll(focused).toBe("voice-low-trig");
+  });
+
+  test("a bare pad on a voice is led through a free conditioner by its fix", async ({ page }) => {
+    const song = await newSong(page.request, "Led through");
+    await page.goto(`${RIG}/songs/${song}`);
+    await page.locator("[data-jack=pad-snare-out]").click();
+    await page.locator("[data-jack=voice-snare-trig]").click();
+    const lead = page.getByRole("button", { name: tag(1) });
+    await expect(lead).toContainText("wrong-kind");
+    await lead.click();
+    await page.getByRole("button", { name: "Use this fix" }).click();
+    await expect(lead).toContainText(/good|tight/);
+    await expect(page.getByRole("button", { name: /^Lead 2, .* to Snare · Trig/ })).toContainText(/good|tight/);
+    await saved(page);
+  });
+
+  test("all four lanes fit a tablet held upright, and a phone reaches the knobs", async ({ page }) => {
+    await page.setViewportSize({ width: 820, height: 1180 });
+    await page.goto(`${RIG}/songs/wet-chalk`);
+    await expect(page.locator("[data-card=desk-1]")).toBeInViewport({ ratio: 1 });
+    await page.setViewportSize({ width: 390, height: 844 });
+    await page.locator("summary", { hasText: "Knobs" }).click();
+    await page.getByRole("button", { name: /^Knobs of Low drum/ }).click();
+    await expect(page.getByRole("dialog").getByRole("slider")).toHaveCount(2);
+  });
+
   test("the list of runs is one key away", async ({ page }) => {
     await page.goto(`${RIG}/songs/wet-chalk`);
     await page.locator("h1").click();
@@ -129,6 +173,16 @@ test("two people on one song keep both their leads, and are asked about one knob
   await turn(two, "End");
   const asked = two.getByRole("dialog", { name: "Somebody else changed the same thing" });
   await expect(asked).toContainText("Low drum · Pitch");
+  // Escape chooses nothing: neither side is thrown away, and the question stays, even for a new visit.
+  await two.keyboard.press("Escape");
+  await expect(two.getByText("Not saved: somebody else changed the same thing.")).toBeVisible();
+  await expect(two.getByRole("button", { name: /^Knobs of Low drum: Pitch at 5 o’clock/ })).toBeVisible();
+  await two.reload();
+  await expect(asked).toBeVisible();
+  await two.keyboard.press("Escape");
+  await two.getByRole("button", { name: "Choose whose stays" }).click();
+  await asked.getByText("All that each of you changed").click();
+  await expect(asked).toContainText("Low drum · Pitch: not set → 5 o’clock.");
   await asked.getByRole("button", { name: "Keep all of mine" }).click();
   await saved(two);
   const stored = (await (await two.request.get(`/api/v1${RIG}/songs/${song}/patch`)).json()) as { patch: { knobs: { position: number }[]; leads: unknown[] } };
@@ -160,12 +214,10 @@ test("an empty rig has its first run on the board after three questions", async 
     await page.locator("main li button").first().click();
     await expect(page.locator("[data-card]")).toHaveCount(cards);
   }
-  await expect(page.getByText("Plug the first lead")).toBeVisible();
-  const jacks = await page.locator("[data-jack]").evaluateAll((all) => all.map((jack) => ({ id: jack.getAttribute("data-jack"), side: jack.getAttribute("data-side") })));
-  await page.locator(`[data-jack="${jacks.find((jack) => jack.side === "out")?.id}"]`).click();
-  await page.locator(`[data-jack="${jacks.find((jack) => jack.side === "in")?.id}"]`).click();
+  // The third answer plugs the run.
+  await expect(page.locator("[data-lead-tag]")).toHaveCount(2);
   await saved(page);
   // Assumed figures are marked, and one measurement is named.
-  await expect(page.locator("[data-lead-tag]")).toContainText("*");
+  for (const lead of await page.locator("[data-lead-tag]").all()) await expect(lead).toContainText("*");
   await expect(page.getByText("Measure next:")).toBeVisible();
 });

@@ -22,6 +22,15 @@ describe("editing a patch", () => {
     const patch = editPatch(editPatch(emptyPatch, plug("a", "o1", "i1")), plug("b", "o2", "i2"));
     expect(editPatch(patch, { type: "renumber", leadId: "b", number: 1 }).leads.map((lead) => lead.number)).toEqual([2, 1]);
   });
+  it("leads a lead through a box: its number goes in, a new one comes out, and its parts stay behind", () => {
+    const bare = editPatch(emptyPatch, plug("a", "o1", "i1"));
+    const patch = editPatch(bare, { type: "inline", leadId: "a", inline: { kind: "series-resistor", seriesOhm: 1000, tol: 0.05 } });
+    const led = editPatch(patch, { type: "through", leadId: "a", newId: "b", inputId: "box-in", outputId: "box-out" });
+    expect(led.leads).toEqual([
+      { id: "a", number: 1, colour: "black", outputId: "o1", inputId: "box-in" },
+      { id: "b", number: 2, colour: "white", outputId: "box-out", inputId: "i1" },
+    ]);
+  });
   it("adds and takes away parts in a lead", () => {
     const patch = editPatch(emptyPatch, plug("a", "o1", "i1"));
     const mended = editPatch(patch, { type: "inline", leadId: "a", inline: { kind: "divider", seriesOhm: 4700, shuntOhm: 5600, tol: 0.05 } });
@@ -30,17 +39,26 @@ describe("editing a patch", () => {
   });
 });
 
-const edit: fc.Arbitrary<PatchEdit> = fc.oneof(
-  fc.record({ type: fc.constant("plug" as const), id: fc.uuid(), outputId: fc.constantFrom("o1", "o2", "o3"), inputId: fc.constantFrom("i1", "i2", "i3") }),
-  fc.record({ type: fc.constant("knob" as const), gearId: fc.constantFrom("g1", "g2"), knobId: fc.constant("k"), position: fc.option(fc.double({ min: 0, max: 1, noNaN: true })) }),
-  fc.record({ type: fc.constant("renumber" as const), leadId: fc.constantFrom("x"), number: fc.integer({ min: 1, max: 9 }) }),
+/** Edits of a lead take the one at this place among those there are when it happens. */
+const place = fc.nat({ max: 8 });
+const [output, input] = [fc.constantFrom("o1", "o2", "o3"), fc.constantFrom("i1", "i2", "i3")];
+const makeEdit: fc.Arbitrary<(leadId: string) => PatchEdit> = fc.oneof(
+  fc.record({ id: fc.uuid(), outputId: output, inputId: input }).map((ends) => () => ({ type: "plug" as const, ...ends })),
+  fc.record({ gearId: fc.constantFrom("g1", "g2"), knobId: fc.constant("k"), position: fc.option(fc.double({ min: 0, max: 1, noNaN: true })) }).map((knob) => () => ({ type: "knob" as const, ...knob })),
+  fc.record({ newId: fc.uuid(), inputId: input, outputId: output }).map((box) => (leadId: string) => ({ type: "through" as const, leadId, ...box })),
+  fc.integer({ min: 1, max: 9 }).map((number) => (leadId: string) => ({ type: "renumber" as const, leadId, number })),
+  fc.constant((leadId: string) => ({ type: "unplug" as const, leadIds: [leadId] })),
 );
+const edits = fc.array(fc.tuple(place, makeEdit), { maxLength: 30 });
 
 describe("history", () => {
   it("undoes any run of edits to where it began, and redoes it to where it was; the patch stays valid", () => {
-    fc.assert(fc.property(fc.array(edit, { maxLength: 30 }), (edits) => {
+    fc.assert(fc.property(edits, (all) => {
       let history = startHistory(emptyPatch);
-      for (const one of edits) history = reduceHistory(history, one);
+      for (const [at, make] of all) {
+        const { leads } = history.present;
+        history = reduceHistory(history, make(leads[at % Math.max(1, leads.length)]?.id ?? "none"));
+      }
       const end = history.present;
       expect(patchSchema.safeParse(end).success).toBe(true);
       const steps = history.past.length;
