@@ -50,10 +50,11 @@ const collide: CollisionDetection = (args) => {
   return closestCenter({ ...args, droppableContainers });
 };
 
-/** What is dragged from the plugging surface hangs at the pointer, not at the surface's corner. */
+/** What is dragged from the plugging surface hangs at the pointer: below a mouse, above a finger, never over the verdict it would get. */
 const atPointer: Modifier = ({ active, activatorEvent, draggingNodeRect, transform }) => {
   if (dragDataOf(active?.data.current)?.type !== "plug" || !(activatorEvent instanceof PointerEvent) || !draggingNodeRect) return transform;
-  return { ...transform, x: transform.x + activatorEvent.clientX - draggingNodeRect.left + 14, y: transform.y + activatorEvent.clientY - draggingNodeRect.top - 14 };
+  const below = activatorEvent.pointerType === "mouse" ? 18 : -60;
+  return { ...transform, x: transform.x + activatorEvent.clientX - draggingNodeRect.left + 14, y: transform.y + activatorEvent.clientY - draggingNodeRect.top + below };
 };
 
 /** Enter stays free to pick a card or unfold it. */

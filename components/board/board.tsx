@@ -56,6 +56,7 @@ export function Board(props: BoardProps) {
   const [pickedLeadId, setPickedLeadId] = useState<string | null>(null);
   const [pickedCardId, setPickedCardId] = useState<string | null>(null);
   const [armed, setArmed] = useState<string | null>(null);
+  const [isDragging, setIsDragging] = useState(false);
   const [listFrom, setListFrom] = useState<string | null>(null);
   const [knobsOf, setKnobsOf] = useState<string | null>(null);
   const [view, setView] = useState<"board" | "runs">("board");
@@ -108,6 +109,10 @@ export function Board(props: BoardProps) {
     announce(`${leadIds.length === 1 ? "Lead" : `${leadIds.length} leads`} unplugged. Control Z brings it back.`);
   }, [announce, edit, patch.leads]);
 
+  const dragJack = useCallback((jackId: string | null) => {
+    setArmed(jackId);
+    setIsDragging(jackId !== null);
+  }, []);
   const tap = useCallback((jackId: string) => {
     setArmed((before) => {
       if (before === null) return jackId;
@@ -221,7 +226,7 @@ export function Board(props: BoardProps) {
         {failed ? <Notice tone="error" title="Not checked" live className="mb-3">The server did not answer the check. The verdicts shown are from before; they follow with the next change.</Notice> : null}
         {gone ? <GoneNotice gone={gone} onClear={canEdit ? () => edit({ type: "replace", patch: gone.patch }) : undefined} /> : null}
         {editor.news ? <Notice tone="done" live className="mb-3">{editor.news} <button type="button" className="underline" onClick={editor.dismissNews}>Good</button></Notice> : null}
-        {armed ? <p role="status" className="fixed bottom-4 left-1/2 z-10 max-w-[90vw] -translate-x-1/2 border-2 border-ink border-l-8 border-l-mark bg-bench px-3 py-1.5 shadow-lg"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
+        {armed && !isDragging ? <p role="status" className="fixed bottom-4 left-1/2 z-10 max-w-[90vw] -translate-x-1/2 border-2 border-ink border-l-8 border-l-mark bg-bench px-3 py-1.5 shadow-lg"><strong>{names.jack(armed)}</strong>: now tap the other end. Escape lets go.</p> : null}
         <div ref={frameRef} className="w-full">
           {cards.length === 0 || (patch.leads.length === 0 && canEdit) ? <FirstRun rigId={rigId} gear={gear} can={can} onPlug={plug} /> : null}
           {cards.length === 0 ? null : showsRuns ? (
@@ -234,7 +239,7 @@ export function Board(props: BoardProps) {
             <div ref={frame} className="group/board -mx-2 overflow-x-auto px-2 overflow-y-hidden pb-3" tabIndex={-1} data-checking={isChecking || undefined}>
               <BoardCanvas
                 cards={shown} layout={layout} scale={scale} isCompact={isCompact} patch={patch} check={check} names={names} chain={chain} pickedLeadId={pickedLeadId} pickedCardId={pickedCardId} canEdit={canEdit}
-                onPickLead={pickLead} onPickCard={pickCard} onKnobs={setKnobsOf} onUnplug={unplug} onJackDrag={setArmed} onPlug={plug} onMoveEnd={moveEnd} onMoveCard={moveCard}
+                onPickLead={pickLead} onPickCard={pickCard} onKnobs={setKnobsOf} onUnplug={unplug} onJackDrag={dragJack} onPlug={plug} onMoveEnd={moveEnd} onMoveCard={moveCard}
               />
             </div>
           )}

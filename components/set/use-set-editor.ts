@@ -25,7 +25,7 @@ export function useSetEditor(rigId: string, initial: SetList, canEdit: boolean) 
       while (waiting.current) {
         const next: string[] = waiting.current;
         waiting.current = null;
-        const { set } = await fetchJson<{ set: SetList }>(paths.api.set(rigId, initial.id), { method: "PUT", body: { baseRevision: saved.current, name: initial.name, songIds: next } });
+        const { set } = await fetchJson<{ set: SetList }>(paths.api.set(rigId, initial.id), { method: "PUT", body: { baseRevision: saved.current, name: initial.name, songIds: next }, keepalive: true });
         saved.current = set.revision;
         setRevision(set.revision);
       }
