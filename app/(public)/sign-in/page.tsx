@@ -1,6 +1,7 @@
 import type { Metadata } from "next";
 import { demoAccounts } from "@/lib/auth/demo-accounts";
 import { SignInForm } from "./_components/sign-in-form";
+import { localPath } from "./local-path";
 
 export const metadata: Metadata = { title: "Sign in" };
 
@@ -16,9 +17,4 @@ export default async function SignInPage({ searchParams }: Props) {
       <SignInForm returnTo={localPath(from)} demo={demoAccounts()} />
     </div>
   );
-}
-
-/** Only a path of this site; anything else leads to the rigs. */
-function localPath(from: string | string[] | undefined): string | null {
-  return typeof from === "string" && /^\/(?![/\\])/.test(from) ? from : null;
 }

@@ -1,7 +1,7 @@
 import type { ReactNode } from "react";
 import { NavLink } from "@/components/ui/nav-link";
 import { Tape } from "@/components/ui/tape";
-import { requireActor } from "@/lib/auth/require-actor";
+import { currentUser } from "@/lib/auth/current-user";
 import { listSets } from "@/lib/data/list-sets";
 import { loadRig } from "@/lib/data/load-rig";
 import { orNotFound } from "@/lib/http/or-not-found";
@@ -14,7 +14,9 @@ interface Props {
 
 export default async function RigLayout({ children, params }: Props) {
   const { rigId } = await params;
-  const actor = await requireActor(paths.rig(rigId));
+  const actor = await currentUser();
+  // The page sends a visitor to sign in, since it alone knows where to come back to.
+  if (!actor) return children;
   const [{ rig }, sets] = await orNotFound(Promise.all([loadRig(actor, rigId), listSets(actor, rigId)]));
   const firstSet = sets[0];
   return (
