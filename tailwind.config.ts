@@ -7,7 +7,7 @@ export const bench = {
   bench: "#f6f8f8",
   raised: "#ffffff",
   tape: "#ffffff",
-  "tape-edge": "#878f94",
+  "tape-edge": "#737c82",
   "tape-ink": "#0d0e0f",
   ink: "#15181a",
   "ink-soft": "#4a5157",

@@ -30,6 +30,13 @@ describe("contrast", () => {
     it("lines show on every ground (3:1)", () => {
       for (const ground of grounds) expect(contrast(theme.line, theme[ground]), ground).toBeGreaterThanOrEqual(3);
     });
+    it("a strip of tape, or else its edge, stands out from every ground (3:1)", () => {
+      for (const ground of grounds) expect(Math.max(contrast(theme.tape, theme[ground]), contrast(theme["tape-edge"], theme[ground])), ground).toBeGreaterThanOrEqual(3);
+    });
+    it("the ring of the focus is seen on every ground: the mark, or the ink it is edged with (3:1)", () => {
+      for (const ground of grounds) expect(Math.max(contrast(theme.mark, theme[ground]), contrast(theme.ink, theme[ground])), ground).toBeGreaterThanOrEqual(3);
+      expect(Math.max(contrast(theme.mark, theme.ink), contrast(theme.mark, theme.bench))).toBeGreaterThanOrEqual(3);
+    });
     it("tape and mark carry their lettering", () => {
       expect(contrast(theme["tape-ink"], theme.tape)).toBeGreaterThanOrEqual(4.5);
       expect(contrast(theme["mark-ink"], theme.mark)).toBeGreaterThanOrEqual(4.5);
