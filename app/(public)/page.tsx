@@ -2,11 +2,15 @@ import Link from "next/link";
 import { ButtonLink } from "@/components/ui/button";
 import { Tape } from "@/components/ui/tape";
 import { currentUser } from "@/lib/auth/current-user";
+import { checkConnection } from "@/lib/core/electrics";
 import { paths } from "@/lib/paths";
+import { connectionRequestSchema } from "@/lib/schemas/connection";
+import { exampleRequest, START } from "./_components/example-lead";
 import { LiveExample } from "./_components/live-example";
 
 export default async function HomePage() {
   const user = await currentUser();
+  const first = checkConnection(connectionRequestSchema.parse(exampleRequest(START)));
   return (
     <div className="flex flex-col gap-12">
       <section className="flex flex-col items-start gap-5">
@@ -26,10 +30,10 @@ export default async function HomePage() {
           )}
         </div>
       </section>
-      <section aria-labelledby="try" className="flex flex-col gap-4 bg-bench p-5">
+      <section aria-labelledby="try" className="flex flex-col gap-4 bg-bench p-4 md:p-5">
         <h2 id="try" className="text-2xl font-bold">Try it: a 9 V trigger into a 5 V input</h2>
         <p className="max-w-prose text-ink-soft">The box runs on a battery, fresh or nearly flat; the chip behind the jack stands half a volt above its own supply. Change a figure and see what the lead would do.</p>
-        <LiveExample />
+        <LiveExample first={first} />
       </section>
       <section aria-labelledby="does" className="grid gap-6 md:grid-cols-3">
         <h2 id="does" className="sr-only">What it does</h2>
