@@ -1,12 +1,13 @@
 "use client";
-import { Button } from "@/components/ui/button";
+import { SiteHeader } from "@/components/ui/site-header";
+import { paths } from "@/lib/paths";
+import { NotShown } from "./_components/not-shown";
 
 export default function PageError({ reset }: { error: Error; reset: () => void }) {
   return (
-    <main id="main" className="mx-auto flex w-full max-w-3xl flex-col items-start gap-4 px-4 py-16">
-      <h1 className="text-3xl font-bold">This page could not be shown</h1>
-      <p className="max-w-prose text-ink-soft">Something went wrong on the server. What you saved is kept. Try again in a moment.</p>
-      <Button tone="primary" onClick={reset}>Try again</Button>
-    </main>
+    <>
+      <SiteHeader name="Knockwire" homeHref={paths.home()} />
+      <NotShown onRetry={reset} />
+    </>
   );
 }

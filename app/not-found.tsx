@@ -1,12 +1,15 @@
-import { ButtonLink } from "@/components/ui/button";
+import type { Metadata } from "next";
+import { SiteHeader } from "@/components/ui/site-header";
 import { paths } from "@/lib/paths";
+import { NothingHere } from "./_components/nothing-here";
+
+export const metadata: Metadata = { title: "Nothing here" };
 
 export default function NotFound() {
   return (
-    <main id="main" className="mx-auto flex w-full max-w-3xl flex-col items-start gap-4 px-4 py-16">
-      <h1 className="text-3xl font-bold">There is nothing here</h1>
-      <p className="max-w-prose text-ink-soft">The page was moved or deleted, or it belongs to a rig you are not in.</p>
-      <ButtonLink tone="primary" href={paths.rigs()}>Your rigs</ButtonLink>
-    </main>
+    <>
+      <SiteHeader name="Knockwire" homeHref={paths.home()} />
+      <NothingHere />
+    </>
   );
 }
