@@ -1,6 +1,8 @@
 export type * from "./types";
 export { layoutChart } from "./layout-chart";
-export { tidyLanes, countCrossings, type TidyCard } from "./tidy-lanes";
+export { shareTracks, type Stretch } from "./share-tracks";
+export { tidyLanes } from "./tidy-lanes";
+export { countCrossings, type TidyCard } from "./count-crossings";
 export { leadChain, type Chain, type ChainCard } from "./lead-chain";
-export { clockText, clockDegrees, CLOCK_STEPS } from "./clock";
-export { lineStyle, hatchStrokes, type LineStyle, type StyledVerdict } from "./line-style";
+export { clockText, readClock, clockDegrees, CLOCK_STEPS } from "./clock";
+export { lineStyle, fitDash, besideLine, hatchStrokes, type LineStyle, type StyledVerdict } from "./line-style";
