@@ -40,6 +40,8 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   const savedRef = useRef(saved);
   const presentRef = useRef(history.present);
   const busy = useRef(false);
+  /** Whether this visit wrote the draft on this device. */
+  const hasDraft = useRef(false);
   const url = paths.api.patch(rigId, songId);
   const { present } = history;
   // Merged anew at every edit, since the question can be put off and edited on.
@@ -114,7 +116,14 @@ export function usePatchEditor(rigId: string, songId: string, initial: Saved, ca
   }, []);
 
   useEffect(() => {
-    if (!canEdit || same(present, saved.patch)) return;
+    if (!canEdit) return;
+    if (same(present, saved.patch)) {
+      // Taken back before it was saved: a draft left behind would bring it back. An earlier visit's draft is not ours to drop here.
+      if (hasDraft.current) dropPatchDraft(songId);
+      hasDraft.current = false;
+      return;
+    }
+    hasDraft.current = true;
     writePatchDraft(songId, { baseRevision: saved.revision, base: saved.patch, patch: present });
     if (clash) return;
     const timer = setTimeout(() => void save(), QUIET_MS);

@@ -130,6 +130,26 @@ test.describe("the board", () => {
     await saved(again);
   });
 
+  test("what is undone and redone before it was saved leaves nothing behind that a reload would bring back", async ({ page }) => {
+    const song = await newSong(page.request, "There and back", "wet-chalk");
+    await page.goto(`${RIG}/songs/${song}`);
+    const lead = page.getByRole("button", { name: tag(2) });
+    await page.locator("[data-lead-tag=wet-chalk-2]").press("Delete");
+    await expect(lead).toHaveCount(0);
+    await saved(page);
+    // Well inside the quiet half second before a save.
+    await page.keyboard.press("Control+z");
+    await expect(lead).toBeVisible();
+    await page.keyboard.press("Control+Shift+z");
+    await expect(lead).toHaveCount(0);
+    await page.waitForTimeout(1200);
+    expect(await page.evaluate((id) => localStorage.getItem(`patch-draft-1:${id}`), song)).toBeNull();
+    await page.reload();
+    await expect(page.locator("[data-card=voice-low]")).toBeVisible();
+    await page.waitForTimeout(1000);
+    await expect(lead).toHaveCount(0);
+  });
+
   test("a save that the server does not answer is kept and sent again", async ({ page }) => {
     const song = await newSong(page.request, "Offline");
     await page.goto(`${RIG}/songs/${song}`);
