@@ -10,7 +10,7 @@ export function VerdictWord({ verdict, className }: { verdict: Verdict; classNam
   return (
     <span className={clsx("inline-flex items-center gap-1.5 font-bold whitespace-nowrap", VERDICT_TONE[verdict], className)}>
       <svg width="30" height="12" viewBox="0 0 30 12" aria-hidden="true" className="shrink-0">
-        <StyledLine points={SAMPLE} verdict={verdict} thin={1.3} />
+        <StyledLine points={SAMPLE} verdict={verdict} thin={1.4} ground="var(--bench)" />
       </svg>
       {verdict}
     </span>

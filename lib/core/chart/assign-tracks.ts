@@ -1,4 +1,4 @@
-/** An interval that needs a track of its own where it meets another: a net's upright run in a gutter. */
+/** An interval that needs a track of its own where it meets another: a net's vertical run in a gutter, or its horizontal run in a corridor. */
 export interface Span {
   net: string;
   from: number;
@@ -9,8 +9,8 @@ export interface Span {
  * Puts intervals on as few tracks as possible so that none lie on each other:
  * sorted by their nearer end, each takes the first track that is free (the
  * left-edge channel algorithm; optimal, its count is the greatest number of
- * intervals at one place). Two that end at exactly one height are leads into one input: they may meet there.
- * @param clearance distance kept between any other two intervals on one track.
+ * intervals at one place).
+ * @param clearance distance kept between two intervals on one track.
  * @returns each net's track, counted from 0.
  * Source: A. Hashimoto and J. Stevens, “Wire routing by optimizing channel assignment within large apertures”, 1971 (from memory).
  */
@@ -18,7 +18,7 @@ export function assignTracks(spans: readonly Span[], clearance: number): Map<str
   const ends: number[] = [];
   const tracks = new Map<string, number>();
   for (const span of [...spans].sort((a, b) => a.from - b.from || a.to - b.to || (a.net < b.net ? -1 : 1))) {
-    let track = ends.findIndex((end) => end === span.from || end + clearance <= span.from);
+    let track = ends.findIndex((end) => end + clearance <= span.from);
     if (track < 0) track = ends.length;
     ends[track] = span.to;
     tracks.set(span.net, track);

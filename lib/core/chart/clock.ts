@@ -13,19 +13,6 @@ export function clockText(position: number): string {
   return halves % 2 === 1 ? `half past ${hour}` : `${hour} o’clock`;
 }
 
-/**
- * The position a person named: “2 o’clock”, “half past 9”, “9:30”, “12”.
- * @returns 0…1, or null where it names no place on the dial (between 5 and 7 there is none).
- */
-export function readClock(text: string): number | null {
-  const match = /^(half past )?(\d{1,2})(?:[:.](\d{2}))?(?: ?o[’']?clock)?$/.exec(text.trim().toLowerCase().replace(/\s+/g, " "));
-  if (!match) return null;
-  const [hour, minutes] = [Number(match[2]), match[1] ? 30 : Number(match[3] ?? 0)];
-  if (hour < 1 || hour > 12 || minutes > 59 || (match[1] && match[3])) return null;
-  const position = (((hour - FIRST_HOUR + 12) % 12) + minutes / 60) / HOURS;
-  return position <= 1 ? position : null;
-}
-
 /** Degrees clockwise from 12 o'clock, −150…150. */
 export function clockDegrees(position: number): number {
   return -150 + 300 * position;

@@ -1,5 +1,3 @@
-import type { Point } from "./types";
-
 /** How a verdict's track is drawn, in units of the thin line's width, so that it survives a black and white printer. */
 export interface LineStyle {
   width: number;
@@ -38,43 +36,11 @@ export function lineStyle(verdict: StyledVerdict): LineStyle {
 }
 
 /**
- * Dashes for one straight part of a line: stretched a little so that it begins and ends in the middle of a dash, and
- * every corner and end is inked.
- * @param length of the part, in the unit of `dash`.
- * @returns the dashes and where in them to begin; no dashes where the part is too short to show any.
- */
-export function fitDash(dash: readonly number[], length: number): { dash: number[]; offset: number } {
-  const period = dash.reduce((sum, part) => sum + part, 0);
-  if (period === 0 || length < period * 0.6) return { dash: [], offset: 0 };
-  const scale = length / (Math.round(length / period) || 1) / period;
-  return { dash: dash.map((part) => part * scale), offset: ((dash[0] ?? 0) * scale) / 2 };
-}
-
-/**
- * A square-cornered line moved sideways, for the two lines of a double one.
- * @param by distance to the right of its direction; negative: to the left.
- */
-export function besideLine(points: readonly Point[], by: number): Point[] {
-  const sides = points.slice(1).map((b, i) => {
-    const a = points[i] as Point;
-    const length = Math.hypot(b.x - a.x, b.y - a.y) || 1;
-    return { x: (-(b.y - a.y) / length) * by, y: ((b.x - a.x) / length) * by };
-  });
-  return points.map((point, i) => {
-    const [before, after] = [sides[i - 1] ?? sides[i], sides[i] ?? sides[i - 1]];
-    if (!before || !after) return point;
-    // On a straight part both are the same; at a square corner each moves along the other's line.
-    const isCorner = before.x * after.x + before.y * after.y < by * by * 0.5;
-    return isCorner ? { x: point.x + before.x + after.x, y: point.y + before.y + after.y } : { x: point.x + before.x, y: point.y + before.y };
-  });
-}
-
-/**
  * Short strokes across a polyline, every `step`, half `reach` to either side.
  * @returns pairs of points.
  */
-export function hatchStrokes(points: readonly Point[], step: number, reach: number): [Point, Point][] {
-  const strokes: [Point, Point][] = [];
+export function hatchStrokes(points: readonly { x: number; y: number }[], step: number, reach: number): [{ x: number; y: number }, { x: number; y: number }][] {
+  const strokes: [{ x: number; y: number }, { x: number; y: number }][] = [];
   for (let i = 1; i < points.length; i += 1) {
     const a = points[i - 1];
     const b = points[i];

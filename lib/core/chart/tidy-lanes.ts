@@ -1,63 +1,49 @@
-import { measureEffort, type Effort, type TidyCard } from "./count-crossings";
-import type { ChartLead } from "./types";
+import type { ChartLead, LaneIndex } from "./types";
+
+export interface TidyCard {
+  id: string;
+  lane: LaneIndex;
+  jacks: readonly { id: string; side: "in" | "out" }[];
+}
 
 const SWEEPS = 8;
-const LANES = [0, 1, 2, 3];
-/** Swaps tried after the sweeps, at most: each costs one layout, so the press of a button stays well under a tenth of a second. */
-const MOST_SWAPS = 40;
+
+/** Crossings between leads whose ends lie in the same two lanes, by the order of their jacks. */
+export function countCrossings(cards: readonly TidyCard[], leads: readonly ChartLead[]): number {
+  const rank = ranks(cards);
+  const ends = leads.flatMap((lead) => {
+    const [from, to] = [rank.get(lead.from), rank.get(lead.to)];
+    return from && to ? [{ gutter: `${from.lane}:${to.lane}`, from: from.row, to: to.row }] : [];
+  });
+  let sum = 0;
+  for (let i = 0; i < ends.length; i += 1) {
+    for (let j = i + 1; j < ends.length; j += 1) {
+      const [a, b] = [ends[i], ends[j]];
+      if (a && b && a.gutter === b.gutter && (a.from - b.from) * (a.to - b.to) < 0) sum += 1;
+    }
+  }
+  return sum;
+}
 
 /**
- * Orders each lane's cards so that leads cross less, and run shorter where they cross as often: every card moves towards the
- * middle of what it is plugged to, lane by lane, there and back; then neighbours change places where that helps. The best
- * order seen is kept, judged by its tracks as they would be drawn, so it is never worse than before.
- * Cards without a lead stand after the others.
+ * Orders each lane's cards so that leads cross less: every card moves towards the middle of what it is
+ * plugged to, lane by lane, there and back; the best order seen is kept, so it is never worse than before.
+ * Cards without a lead keep their place after the others.
  * Source: barycentre sweeps, K. Sugiyama et al., IEEE Trans. SMC-11 (1981), from memory.
  */
 export function tidyLanes<T extends TidyCard>(cards: readonly T[], leads: readonly ChartLead[]): T[] {
   let best = [...cards];
-  let least = measureEffort(best, leads);
-  const consider = (order: T[]): boolean => {
-    const effort = measureEffort(order, leads);
-    if (!isLess(effort, least)) return false;
-    [best, least] = [order, effort];
-    return true;
-  };
-  // Lanes are sorted outwards from either end; starting from both sides finds different orders.
-  for (const first of [[1, 2, 3], [2, 1, 0]]) {
-    let current = [...cards];
-    for (let sweep = 0; sweep < SWEEPS; sweep += 1) {
-      const lanes = sweep % 2 === 0 ? first : [...first].reverse().concat(LANES.filter((lane) => !first.includes(lane)));
-      for (const lane of lanes) current = sortLane(current, leads, lane);
-      consider(current);
+  let fewest = countCrossings(best, leads);
+  let current = best;
+  for (let sweep = 0; sweep < SWEEPS && fewest > 0; sweep += 1) {
+    for (const lane of sweep % 2 === 0 ? [1, 2, 3] : [2, 1, 0]) current = sortLane(current, leads, lane);
+    const crossings = countCrossings(current, leads);
+    if (crossings < fewest) {
+      fewest = crossings;
+      best = current;
     }
   }
-  swapNeighbours(() => best, consider, plugged(cards, leads));
   return best;
-}
-
-function isLess(a: Effort, b: Effort): boolean {
-  return a.crossings < b.crossings || (a.crossings === b.crossings && a.rows < b.rows - 1e-6);
-}
-
-function plugged(cards: readonly TidyCard[], leads: readonly ChartLead[]): Set<string> {
-  const used = new Set(leads.flatMap((lead) => [lead.from, lead.to]));
-  return new Set(cards.filter((card) => card.jacks.some((jack) => used.has(jack.id))).map((card) => card.id));
-}
-
-function swapNeighbours<T extends TidyCard>(current: () => T[], consider: (order: T[]) => boolean, movable: ReadonlySet<string>): void {
-  let tried = 0;
-  for (let helped = true; helped && tried < MOST_SWAPS; ) {
-    helped = false;
-    for (let i = 0; i < current().length && tried < MOST_SWAPS; i += 1) {
-      const order = [...current()];
-      const card = order[i] as T;
-      const j = order.findIndex((other, index) => index > i && other.lane === card.lane);
-      if (j < 0 || !movable.has(card.id) || !movable.has((order[j] as T).id)) continue;
-      [order[i], order[j]] = [order[j] as T, card];
-      tried += 1;
-      if (consider(order)) helped = true;
-    }
-  }
 }
 
 function sortLane<T extends TidyCard>(cards: readonly T[], leads: readonly ChartLead[], lane: number): T[] {
@@ -83,8 +69,8 @@ function sortLane<T extends TidyCard>(cards: readonly T[], leads: readonly Chart
   return cards.map((card) => (card.lane === lane ? (sorted[next++] as T) : card));
 }
 
-function ranks(cards: readonly TidyCard[]): Map<string, { lane: number; row: number }> {
-  const rank = new Map<string, { lane: number; row: number }>();
+function ranks(cards: readonly TidyCard[]): Map<string, { lane: LaneIndex; row: number }> {
+  const rank = new Map<string, { lane: LaneIndex; row: number }>();
   const rows = [0, 0, 0, 0];
   for (const card of cards) {
     for (const jack of card.jacks) rank.set(jack.id, { lane: card.lane, row: (rows[card.lane] as number)++ });

@@ -18,7 +18,7 @@ export interface ChartMetrics {
   inTagWidth: number;
   /** Least width of a gutter without any lead. */
   gutterMin: number;
-  /** Height of a tag. Not above `jackPitch`, or tags of neighbouring jacks would overlap. */
+  /** Height of a tag, for the boxes of `Track`. */
   tagHeight: number;
 }
 
@@ -72,11 +72,11 @@ export interface PlacedJack extends Point {
   side: "in" | "out";
 }
 
-/** One lead's way: square corners, from the output to the input. */
+/** One lead's way: square corners, from the output to the input. Leads of one node share their trunk. */
 export interface Track {
   leadId: string;
   points: Point[];
-  /** The output jack. Leads of one output share their trunk; leads of different outputs meet only on the row of a common input. */
+  /** Leads with the same net are joined electrically and may lie on each other. */
   net: string;
   /** True where the input lies left of, or under, the output's own lane: draw an arrowhead at the input. */
   backward: boolean;
@@ -89,12 +89,6 @@ export interface Tag extends Box {
   end: "out" | "in";
 }
 
-/** Where three or more ways of joined leads meet. */
-export interface Junction extends Point {
-  /** Leads that pass through it. */
-  leadIds: string[];
-}
-
 export interface ChartLayout {
   width: number;
   height: number;
@@ -102,7 +96,8 @@ export interface ChartLayout {
   jacks: PlacedJack[];
   tracks: Track[];
   tags: Tag[];
-  junctions: Junction[];
+  /** Where branches of one net meet. */
+  junctions: (Point & { net: string })[];
   /** Left edge and width of each lane. */
   lanes: { x: number; width: number }[];
   /** Where the cards begin, below the upper corridors. */
